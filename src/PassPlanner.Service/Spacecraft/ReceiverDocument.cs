@@ -1,0 +1,60 @@
+using PassPlanner.Service.Radios;
+using PassPlanner.Service.Validation;
+
+namespace PassPlanner.Service.Spacecraft;
+
+/// <summary>A receiver and its antenna.</summary>
+public sealed record ReceiverDocument : IRadioDocument
+{
+    /// <summary>Identifier within the spacecraft.</summary>
+    [Identifier(Required = true)]
+    public string? Id { get; init; }
+
+    /// <summary>Carrier frequency.</summary>
+    [Quantity(1e6, 3e11, "Hz", Required = true)]
+    public double? FrequencyHz { get; init; }
+
+    /// <summary>G/T where the antenna's gain is greatest; the pattern gives the gain relative to that.</summary>
+    [Quantity(-100, 100, "dB/K", Required = true)]
+    public double? GOverTDbPerK { get; init; }
+
+    /// <inheritdoc/>
+    [Quantity(-10, 50, "dB")]
+    public double? RequiredMarginDb { get; init; }
+
+    /// <inheritdoc/>
+    [Quantity(0, 90, "degrees")]
+    public double? MinimumElevationDeg { get; init; }
+
+    /// <inheritdoc/>
+    [Quantity(0, 3600, "s")]
+    public double? AcquisitionS { get; init; }
+
+    /// <summary>Share of the year whose weather the margin must stand; 99 when left out; used by the weather models.</summary>
+    [Quantity(50, 99.999, "percent")]
+    public double? AvailabilityPercent { get; init; }
+
+    /// <inheritdoc/>
+    [Part(Required = true)]
+    public PatternDocument? Pattern { get; init; }
+
+    /// <inheritdoc/>
+    [Quantity(-1e6, 1e6, "", Count = 3)]
+    public IReadOnlyList<double>? Boresight { get; init; }
+
+    /// <inheritdoc/>
+    [Quantity(-1e6, 1e6, "", Count = 3)]
+    public IReadOnlyList<double>? Reference { get; init; }
+
+    /// <inheritdoc/>
+    [Part(Required = true)]
+    public PolarisationDocument? Polarisation { get; init; }
+
+    /// <inheritdoc/>
+    [Choice("worst", "mean", "best")]
+    public string? PolarisationCase { get; init; }
+
+    /// <inheritdoc/>
+    [List(1, 64, Required = true)]
+    public IReadOnlyList<WaveformDocument>? Waveforms { get; init; }
+}

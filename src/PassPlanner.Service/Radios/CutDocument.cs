@@ -14,6 +14,6 @@ public sealed record CutDocument
     public IReadOnlyList<double>? AngleDeg { get; init; }
 
     /// <summary>Gain at each angle.</summary>
-    [Quantity(-200, 100, "dBi", Required = true)]
+    [Quantity(-100, 100, "dBi", Required = true)]
     public IReadOnlyList<double>? GainDbi { get; init; }
 }

@@ -25,19 +25,23 @@ public sealed record PatternDocument
     [Quantity(0, 100, "m", AboveMinimum = true)]
     public double? DiameterM { get; init; }
 
-    /// <summary>Illumination at the edge below that in the middle (taperedAperture).</summary>
+    /// <summary>Illumination at the edge below that in the middle (taperedAperture); 11 when left out.</summary>
     [Quantity(0, 60, "dB")]
     public double? EdgeTaperDb { get; init; }
 
-    /// <summary>Exponent n of the parabola on its pedestal, 1 or 2 (taperedAperture); 2 when left out.</summary>
+    /// <summary>Exponent n of the parabola on its pedestal, 1 or 2 (taperedAperture); 1 when left out.</summary>
     [Quantity(1, 2, "")]
-    public int? TaperExponent { get; init; }
+    public int? PedestalExponent { get; init; }
 
-    /// <summary>Aperture efficiency in all but surface error (taperedAperture); the taper's own when left out.</summary>
+    /// <summary>Frequency at which halfPowerBeamwidthDeg was measured (taperedAperture).</summary>
+    [Quantity(3e7, 3e11, "Hz")]
+    public double? HalfPowerBeamwidthFrequencyHz { get; init; }
+
+    /// <summary>Aperture efficiency in all but surface error (taperedAperture); that of taper and blockage when left out.</summary>
     [Quantity(0, 1, "", AboveMinimum = true)]
     public double? Efficiency { get; init; }
 
-    /// <summary>Gain over directivity (halfWaveDipole, taperedAperture without efficiency); 1 when left out.</summary>
+    /// <summary>Gain over directivity (halfWaveDipole, gaussianBeam of which gain or width is left out, taperedAperture without efficiency); 1 when left out.</summary>
     [Quantity(0, 1, "", AboveMinimum = true)]
     public double? OhmicEfficiency { get; init; }
 

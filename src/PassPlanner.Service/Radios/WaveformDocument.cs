@@ -14,11 +14,11 @@ public sealed record WaveformDocument
     public double? BitRateBps { get; init; }
 
     /// <summary>Eb/N0 needed by the ideal receiver.</summary>
-    [Quantity(-5, 60, "dB", Required = true)]
+    [Quantity(-2, 60, "dB", Required = true)]
     public double? RequiredEbN0Db { get; init; }
 
     /// <summary>Loss of the real modem; 0 when left out.</summary>
-    [Quantity(0, 20, "dB")]
+    [Quantity(0, 30, "dB")]
     public double? ImplementationLossDb { get; init; }
 
     /// <summary>Share of the information bits that carry the user's bytes; 1 when left out.</summary>

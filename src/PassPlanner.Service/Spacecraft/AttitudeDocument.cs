@@ -14,6 +14,6 @@ public sealed record AttitudeDocument
     public IReadOnlyList<double>? Quaternion { get; init; }
 
     /// <summary>Percentile of the gain over all directions that is used (uncontrolled): this share of the sphere has less; 10 when left out.</summary>
-    [Quantity(0, 100, "percent")]
+    [Quantity(0, 100, "percent", AboveMinimum = true, BelowMaximum = true)]
     public double? Percentile { get; init; }
 }

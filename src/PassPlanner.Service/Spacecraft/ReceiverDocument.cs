@@ -11,11 +11,11 @@ public sealed record ReceiverDocument : IRadioDocument
     public string? Id { get; init; }
 
     /// <summary>Carrier frequency.</summary>
-    [Quantity(1e6, 3e11, "Hz", Required = true)]
+    [Quantity(3e7, 3e11, "Hz", Required = true)]
     public double? FrequencyHz { get; init; }
 
     /// <summary>G/T where the antenna's gain is greatest; the pattern gives the gain relative to that.</summary>
-    [Quantity(-100, 100, "dB/K", Required = true)]
+    [Quantity(-60, 80, "dB/K", Required = true)]
     public double? GOverTDbPerK { get; init; }
 
     /// <inheritdoc/>

@@ -11,7 +11,7 @@ public sealed record TransmitterDocument : IRadioDocument
     public string? Id { get; init; }
 
     /// <summary>Carrier frequency.</summary>
-    [Quantity(1e6, 3e11, "Hz", Required = true)]
+    [Quantity(3e7, 3e11, "Hz", Required = true)]
     public double? FrequencyHz { get; init; }
 
     /// <summary>Power of the amplifier.</summary>

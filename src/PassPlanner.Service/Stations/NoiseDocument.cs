@@ -14,18 +14,18 @@ public sealed record NoiseDocument
     public double? SystemNoiseTemperatureK { get; init; }
 
     /// <summary>G/T on the boresight (kind gOverT).</summary>
-    [Quantity(-100, 100, "dB/K")]
+    [Quantity(-60, 80, "dB/K")]
     public double? GOverTDbPerK { get; init; }
 
     /// <summary>Noise temperature of the receiver at its input (kind components).</summary>
-    [Quantity(0, 1e5, "K", AboveMinimum = true)]
+    [Quantity(0, 1e6, "K", AboveMinimum = true)]
     public double? ReceiverNoiseTemperatureK { get; init; }
 
     /// <summary>Physical temperature of the line (kind components); 290 when left out.</summary>
-    [Quantity(0, 1000, "K")]
+    [Quantity(0, 400, "K")]
     public double? LineTemperatureK { get; init; }
 
     /// <summary>Noise picked up from the ground and the structure (kind components); 0 when left out.</summary>
-    [Quantity(0, 1000, "K")]
+    [Quantity(0, 400, "K")]
     public double? SpilloverTemperatureK { get; init; }
 }

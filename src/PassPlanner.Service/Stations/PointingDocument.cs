@@ -10,7 +10,7 @@ public sealed record PointingDocument
     public double? BiasDeg { get; init; }
 
     /// <summary>Random error, rms of the angle on the sky over both axes; 0 when left out.</summary>
-    [Quantity(0, 45, "degrees")]
+    [Quantity(0, 11, "degrees")]
     public double? JitterRmsDeg { get; init; }
 
     /// <summary>Time between two commanded directions; 0, continuous, when left out.</summary>

@@ -11,11 +11,11 @@ public sealed record ReceiveChainDocument
     public string? Id { get; init; }
 
     /// <summary>Lowest frequency received.</summary>
-    [Quantity(1e6, 3e11, "Hz", Required = true)]
+    [Quantity(3e7, 3e11, "Hz", Required = true)]
     public double? FromHz { get; init; }
 
     /// <summary>Highest frequency received.</summary>
-    [Quantity(1e6, 3e11, "Hz", Required = true)]
+    [Quantity(3e7, 3e11, "Hz", Required = true)]
     public double? ToHz { get; init; }
 
     /// <summary>Antenna pattern.</summary>

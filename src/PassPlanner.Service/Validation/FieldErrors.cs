@@ -15,7 +15,8 @@ public sealed class FieldErrors
     public void Add(string pointer, string detail) => items.Add(new FieldError(pointer, detail));
 
     /// <summary>
-    /// Runs a step that builds a domain object; what the domain refuses becomes an error at the pointer.
+    /// Runs a step that builds a domain object; what the domain refuses becomes an error at the member
+    /// that it names below the pointer.
     /// Returns the default value then.
     /// </summary>
     public T? Try<T>(string pointer, Func<T> build)
@@ -28,7 +29,7 @@ public sealed class FieldErrors
         {
             // The parameter name that .NET appends is for programmers; the sentence before it is for the user.
             int tail = refused.Message.IndexOf(" (Parameter '", StringComparison.Ordinal);
-            Add(pointer, tail < 0 ? refused.Message : refused.Message[..tail]);
+            Add(refused.ParamName is null ? pointer : $"{pointer}/{refused.ParamName}", tail < 0 ? refused.Message : refused.Message[..tail]);
             return default;
         }
     }

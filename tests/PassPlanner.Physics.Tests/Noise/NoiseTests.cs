@@ -67,9 +67,11 @@ public partial class NoiseTests(ITestOutputHelper output)
         }
 
         var published = new ComponentNoise(NoiseFigure.ToTemperatureK(3.5));
-        error.Check(3300, published.AtTerminalK(290, 7.1), PrintedToTwoFiguresK, "published at the antenna flange");
+        error.Report(4);
+        var flange = new WorstError(output, "radio/noise.csv, system temperature as published to two figures", "K");
+        flange.Check(3300, published.AtTerminalK(290, 7.1), PrintedToTwoFiguresK, "published at the antenna flange");
         Assert.Equal(290 * Math.Pow(10, 0.35) * Math.Pow(10, 0.71), published.AtTerminalK(290, 7.1), 9);
-        error.Report(5);
+        flange.Report(1);
     }
 
     [Fact]

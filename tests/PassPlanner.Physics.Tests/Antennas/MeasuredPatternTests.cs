@@ -51,6 +51,7 @@ public class MeasuredPatternTests
         Assert.Equal(-4, pattern.GainDbi(1, double.DegreesToRadians(210)), 9);
         Assert.Equal(-1, pattern.GainDbi(1, double.DegreesToRadians(120)), 9);
         Assert.Equal(-1, pattern.GainDbi(1, double.DegreesToRadians(300)), 9);
+        Assert.Equal(1, pattern.GainDbi(1, 0), 9); // past the turn: 150 of the 180 degrees from 210 to 390
     }
 
     [Fact]

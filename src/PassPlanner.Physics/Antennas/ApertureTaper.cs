@@ -5,7 +5,7 @@ namespace PassPlanner.Physics.Antennas;
 /// <summary>
 /// The field over a circular aperture of radius 1: a parabola to the power n on a pedestal,
 /// E(r) = C + (1 - C)(1 - r^2)^n, C being the field at the edge
-/// (W. L. Stutzman, G. A. Thiele, Antenna Theory and Design, 3rd edition, section 9.3; C. A. Balanis, table 12.1 for C = 0).
+/// (W. L. Stutzman, G. A. Thiele, Antenna Theory and Design, circular apertures with parabolic tapers on a pedestal).
 /// </summary>
 internal readonly record struct ApertureTaper
 {
@@ -59,7 +59,7 @@ internal readonly record struct ApertureTaper
         return b2 * ((edgeField * PowerTransform(0, v)) + (rest * parabola));
     }
 
-    /// <summary>The integral of (1 - s^2)^k J0(v s) s ds over 0 to 1: 2^k k! J(k+1)(v) / v^(k+1) (Balanis, section 12.5).</summary>
+    /// <summary>The integral of (1 - s^2)^k J0(v s) s ds over 0 to 1: 2^k k! J(k+1)(v) / v^(k+1) (Sonine's first integral, NIST DLMF 10.22.19).</summary>
     private static double PowerTransform(int k, double v)
     {
         double atAxis = 1.0 / (2 * (k + 1));

@@ -18,7 +18,10 @@ public sealed class PatternTable
     private readonly Grid fine;
     private readonly Grid coarse;
 
-    /// <summary>The table of a pattern, with the mean over jitter when there is any.</summary>
+    /// <summary>
+    /// The table of a pattern, with the mean over jitter when there is any: in closed form for a Gaussian beam, else by
+    /// quadrature over the table without jitter, since a look-up costs a hundredth of the pattern's own formula.
+    /// </summary>
     /// <param name="pattern">The pattern.</param>
     /// <param name="jitterRmsRad">Rms of the jitter's angle on the sky, both axes together, rad, 0 to 0.2.</param>
     /// <exception cref="ArgumentOutOfRangeException">The jitter is out of range.</exception>
@@ -31,10 +34,16 @@ public sealed class PatternTable
         coarse = new Grid(gainDbi, border, Math.PI, border < Math.PI ? CoarseSteps : 1);
         if (jitterRmsRad > 0)
         {
-            gainDbi = pattern is GaussianBeamPattern beam
-                ? angle => beam.MeanGainDbi(angle, jitterRmsRad)
-                : MeanOfTable(jitterRmsRad);
-            (fine, coarse) = (new Grid(gainDbi, 0, border, FineSteps), new Grid(gainDbi, border, Math.PI, coarse.Steps));
+            var without = (fine, coarse);
+            double tableDbi(double angle) => angle < without.fine.End ? without.fine.At(angle) : without.coarse.At(angle);
+            var beam = pattern as GaussianBeamPattern;
+            gainDbi = angle => beam?.MeanGainDbi(angle, jitterRmsRad) ?? JitterQuadrature.Fine.MeanDbi(tableDbi, angle, jitterRmsRad);
+            fine = new Grid(gainDbi, 0, border, FineSteps);
+            coarse = new Grid(
+                angle => beam?.MeanGainDbi(angle, jitterRmsRad) ?? JitterQuadrature.Coarse.MeanDbi(tableDbi, angle, jitterRmsRad),
+                border,
+                Math.PI,
+                coarse.Steps);
         }
 
         PeakGainDbi = pattern.PeakGainDbi;
@@ -73,15 +82,6 @@ public sealed class PatternTable
 
             return worst;
         };
-    }
-
-    /// <summary>The mean over jitter, taken from the table without jitter: a table look-up costs a hundredth of a closed form.</summary>
-    private Func<double, double> MeanOfTable(double jitterRmsRad)
-    {
-        Grid fineWithout = fine;
-        Grid coarseWithout = coarse;
-        double without(double angle, double phi) => angle < fineWithout.End ? fineWithout.At(angle) : coarseWithout.At(angle);
-        return angle => JitterAveragedPattern.MeanByQuadratureDbi(without, angle, 0, jitterRmsRad);
     }
 
     private readonly struct Grid

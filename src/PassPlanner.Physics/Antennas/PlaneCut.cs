@@ -1,4 +1,3 @@
-using MathNet.Numerics.RootFinding;
 using PassPlanner.Physics.Links;
 
 namespace PassPlanner.Physics.Antennas;
@@ -85,11 +84,23 @@ internal sealed class PlaneCut
             double next = angle + (side * stepRad);
             if (GainDbi(next) <= half)
             {
-                return Bisection.FindRoot(x => GainDbi(x) - half, Math.Min(angle, next), Math.Max(angle, next), 1e-13, 200);
+                return Crossing(angle, next, half);
             }
         }
 
         return null;
+    }
+
+    /// <summary>Where the gain passes a level between an angle above it and one below; a step counts as a crossing.</summary>
+    private double Crossing(double aboveRad, double belowRad, double levelDbi)
+    {
+        for (int i = 0; i < 50; i++)
+        {
+            double middle = (aboveRad + belowRad) / 2;
+            (aboveRad, belowRad) = GainDbi(middle) > levelDbi ? (middle, belowRad) : (aboveRad, middle);
+        }
+
+        return (aboveRad + belowRad) / 2;
     }
 
     /// <summary>Golden-section search within a step of an angle.</summary>

@@ -1,3 +1,5 @@
+using System.Globalization;
+
 namespace PassPlanner.Physics.Frames;
 
 /// <summary>A vector of three doubles; the axes and the unit are those of the quantity that it holds.</summary>
@@ -23,6 +25,9 @@ public readonly record struct Vector3D(double X, double Y, double Z)
 
     /// <summary>Angle to another vector, rad, 0 to pi; exact near 0 and pi too.</summary>
     public double AngleToRad(in Vector3D other) => Math.Atan2(Cross(other).Norm, Dot(other));
+
+    /// <summary>The three components; a record's own text would print <see cref="Unit"/> of <see cref="Unit"/> without end.</summary>
+    public override string ToString() => string.Create(CultureInfo.InvariantCulture, $"({X}, {Y}, {Z})");
 
     /// <summary>Sum.</summary>
     public static Vector3D operator +(in Vector3D left, in Vector3D right) => new(left.X + right.X, left.Y + right.Y, left.Z + right.Z);

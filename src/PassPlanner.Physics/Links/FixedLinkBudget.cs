@@ -110,7 +110,7 @@ public sealed record FixedLinkBudget(
             {
                 double lossDb = inputs.FreeSpaceLossDb ?? FreeSpaceLoss.Db(inputs.SlantRangeKm!.Value, inputs.FrequencyHz); // FixedLinkCheck: one of the two is given
                 powerFluxDensityDbWPerM2 = lines.TotalDb - lossDb - isotropicAreaDbM2;
-                lines.Term("freeSpaceLoss", "Free-space loss", -lossDb, "dB", inputs.FreeSpaceLossDb is null ? "ITU-R P.525-4" : Entered);
+                lines.Term("freeSpaceLoss", "Free-space loss", -lossDb, "dB", inputs.FreeSpaceLossDb is null ? "ITU-R P.525" : Entered);
             }
 
             lines.Sum("isotropicPower", "Power in an isotropic antenna, free space", "dBW");

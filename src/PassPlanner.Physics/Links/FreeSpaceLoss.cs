@@ -1,6 +1,6 @@
 namespace PassPlanner.Physics.Links;
 
-/// <summary>Free-space basic transmission loss between isotropic antennas (ITU-R P.525-4, equation 4): 20 log10(4 pi d / lambda).</summary>
+/// <summary>Free-space basic transmission loss between isotropic antennas (ITU-R P.525, section 2.2, point-to-point links): 20 log10(4 pi d / lambda).</summary>
 public static class FreeSpaceLoss
 {
     /// <summary>Loss, dB.</summary>

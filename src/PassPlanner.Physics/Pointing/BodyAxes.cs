@@ -8,14 +8,16 @@ namespace PassPlanner.Physics.Pointing;
 /// <param name="Z">Body +Z.</param>
 public readonly record struct BodyAxes(Vector3D X, Vector3D Y, Vector3D Z)
 {
+    private const double ParallelSine = 1e-6;
+
     /// <summary>Axes with +Z along a direction and +X as near as can be to another.</summary>
     /// <param name="z">Direction of +Z, not zero.</param>
-    /// <param name="nearX">Direction that +X comes near to; when it is parallel to +Z, any perpendicular one serves.</param>
+    /// <param name="nearX">Direction that +X comes near to; when it is parallel to +Z (to a millionth of a radian), any perpendicular one serves.</param>
     public static BodyAxes Along(in Vector3D z, in Vector3D nearX)
     {
         Vector3D zUnit = z.Unit;
         Vector3D x = nearX - (zUnit * nearX.Dot(zUnit));
-        if (x.Norm <= 1e-9 * nearX.Norm)
+        if (x.Norm <= ParallelSine * nearX.Norm)
         {
             Vector3D other = Math.Abs(zUnit.X) < 0.5 ? new Vector3D(1, 0, 0) : new Vector3D(0, 1, 0);
             x = other - (zUnit * other.Dot(zUnit));

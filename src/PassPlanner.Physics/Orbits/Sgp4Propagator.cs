@@ -43,7 +43,11 @@ public sealed class Sgp4Propagator
         if (c.IsDeepSpace)
         {
             JulianDateUt1 epoch = elements.EpochUtc.ToUt1(0.0);
-            double days1950 = epoch.Day - 2433281.5 + epoch.FractionOfDay;
+
+            // One double on purpose: the published code rounds the epoch's Julian date so (to 40 microseconds), and the
+            // published states of orbits that the Moon disturbs strongly show it (23333: 4 mm at perigee).
+            double julianDate = epoch.Day + epoch.FractionOfDay;
+            double days1950 = julianDate - 2433281.5;
             deepSpace = new Sgp4DeepSpace(c, gravity, days1950, EarthRotation.GreenwichMeanSiderealTimeRad(epoch));
         }
     }

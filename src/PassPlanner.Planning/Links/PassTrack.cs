@@ -52,10 +52,11 @@ public sealed class PassTrack(int capacity)
         StartUtc = startUtc;
         StepS = stepS;
         Count = 0;
+        var sweep = default(Sgp4Sweep);
         for (int i = 0; i < count; i++)
         {
             UtcInstant instant = UtcOf(i);
-            if (trajectory.TryTeme(instant, out TemeState teme) != Sgp4Status.Ok)
+            if (trajectory.TryTeme(instant, ref sweep, out TemeState teme) != Sgp4Status.Ok)
             {
                 return;
             }

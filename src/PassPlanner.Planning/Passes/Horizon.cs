@@ -17,7 +17,7 @@ internal sealed class Horizon(SpacecraftTrajectory trajectory, TopocentricFrame 
 
     /// <summary>The sample of a known state.</summary>
     public HorizonSample SampleOf(double timeS, in EcefState state) => new(
-        timeS, station.SineOfElevation(state.PositionKm) - lowestSine, station.RateOfSineOfElevation(state));
+        timeS, station.SinElevation(state.PositionKm) - lowestSine, RateOfSinElevation(state));
 
     /// <summary>The sample at a time; nothing where there is no position.</summary>
     public HorizonSample? SampleAt(double timeS) =>
@@ -103,8 +103,16 @@ internal sealed class Horizon(SpacecraftTrajectory trajectory, TopocentricFrame 
     }
 
     private double SineExcess(double timeS) =>
-        trajectory.TryEcef(UtcOf(timeS), out EcefState state) == Sgp4Status.Ok ? station.SineOfElevation(state.PositionKm) - lowestSine : -2;
+        trajectory.TryEcef(UtcOf(timeS), out EcefState state) == Sgp4Status.Ok ? station.SinElevation(state.PositionKm) - lowestSine : -2;
 
     private double Rate(double timeS) =>
-        trajectory.TryEcef(UtcOf(timeS), out EcefState state) == Sgp4Status.Ok ? station.RateOfSineOfElevation(state) : 0;
+        trajectory.TryEcef(UtcOf(timeS), out EcefState state) == Sgp4Status.Ok ? RateOfSinElevation(state) : 0;
+
+    private double RateOfSinElevation(in EcefState state)
+    {
+        Vector3D lineOfSight = state.PositionKm - station.PositionKm;
+        double rangeKm = lineOfSight.Norm;
+        double rangeRate = lineOfSight.Dot(state.VelocityKmPerS) / rangeKm;
+        return (state.VelocityKmPerS.Dot(station.Up) - (lineOfSight.Dot(station.Up) / rangeKm * rangeRate)) / rangeKm;
+    }
 }

@@ -105,7 +105,7 @@ public sealed class PassPredictor(PlanningModel model)
     private IReadOnlyList<LinkChain> ChainsWanted(Spacecraft spacecraft, Station station, Func<Link, bool> wantsLink) =>
         [.. model.ChainsBetween(spacecraft, station).Where(chain => wantsLink(chain.Link))];
 
-    private IReadOnlyList<PredictedPass> Assess(
+    private List<PredictedPass> Assess(
         Spacecraft spacecraft,
         SpacecraftTrajectory trajectory,
         Station station,

@@ -34,12 +34,12 @@ public sealed class ExampleOperationFilter : IOperationFilter
         Type? body = context.ApiDescription.ParameterDescriptions.FirstOrDefault(p => p.Source.Id == "Body")?.Type
             ?? context.ApiDescription.ActionDescriptor.EndpointMetadata
                 .OfType<Microsoft.AspNetCore.Http.Metadata.IAcceptsMetadata>().FirstOrDefault()?.RequestType;
-        if (content.TryGetValue("application/json", out OpenApiMediaType? media) && ExampleOf(body) is { } example)
+        if (content.TryGetValue("application/json", out IOpenApiMediaType? media) && media is OpenApiMediaType json && ExampleOf(body) is { } example)
         {
-            media.Example = example;
+            json.Example = example;
         }
 
-        if (content.TryGetValue("text/plain", out OpenApiMediaType? text))
+        if (content.TryGetValue("text/plain", out IOpenApiMediaType? plain) && plain is OpenApiMediaType text)
         {
             text.Example = JsonValue.Create(DemoScenario.ExampleTwoLines);
         }

@@ -28,6 +28,22 @@ public static class OpenApiSetup
         });
     }
 
+    /// <summary>Serves the description at /openapi/v1.json and a page to try it at /openapi.</summary>
+    public static void MapOpenApiDescription(this WebApplication app)
+    {
+        app.UseSwagger(options =>
+        {
+            options.RouteTemplate = "openapi/{documentName}.json";
+            options.OpenApiVersion = OpenApiSpecVersion.OpenApi3_1;
+        });
+        app.UseSwaggerUI(options =>
+        {
+            options.RoutePrefix = "openapi";
+            options.SwaggerEndpoint("v1.json", "Pass Planner v1");
+            options.DocumentTitle = "Pass Planner API";
+        });
+    }
+
     private static string SchemaIdOf(Type type) => type.IsGenericType
         ? type.Name.Split('`')[0] + "Of" + string.Concat(type.GetGenericArguments().Select(SchemaIdOf))
         : type.Name;

@@ -32,7 +32,7 @@ public static class PassWriter
     public static ElementSetUse ElementSetOf(PredictedPass predicted)
     {
         double ageH = predicted.Pass.MaximumElevationUtc.SecondsSince(predicted.ElementSet.EpochUtc) / 3600;
-        double limitH = ElementSetAge.LimitHours(predicted.ElementSet);
+        double limitH = ElementSetAge.LimitHours(ElementSetAge.ClassOf(predicted.ElementSet));
         return new ElementSetUse
         {
             EpochUtc = predicted.ElementSet.EpochUtc.ToString(),

@@ -1,4 +1,6 @@
 using System.Text;
+using Microsoft.AspNetCore.Http.HttpResults;
+using PassPlanner.Physics.Frames;
 using PassPlanner.Physics.Links;
 using PassPlanner.Physics.Orbits;
 using PassPlanner.Physics.Time;
@@ -23,12 +25,12 @@ public static class PassesApi
     public static void MapPasses(this IEndpointRouteBuilder routes)
     {
         RouteGroupBuilder group = routes.MapGroup("/passes").WithTags("Passes");
-        group.MapGet("", List).Produces<PassListResponse>().Problems(400);
-        group.MapGet("/{spacecraft}/{station}/{instantUtc}", Get).Produces<PassDetailResponse>().Problems(400, 404);
+        group.MapGet("", List).Problems(400);
+        group.MapGet("/{spacecraft}/{station}/{instantUtc}", Get).Problems(400, 404);
         group.MapGet("/{spacecraft}/{station}/{instantUtc}/timeline", Timeline)
             .Produces<TimelineResponse>(200, "application/json", "text/csv").Problems(400, 404);
-        group.MapGet("/{spacecraft}/{station}/{instantUtc}/budget", Budget).Produces<BudgetResponse>().Problems(400, 404);
-        group.MapGet("/{spacecraft}/{station}/{instantUtc}/pointing", Pointing).Produces<PointingResponse>().Problems(400, 404);
+        group.MapGet("/{spacecraft}/{station}/{instantUtc}/budget", Budget).Problems(400, 404);
+        group.MapGet("/{spacecraft}/{station}/{instantUtc}/pointing", Pointing).Problems(400, 404);
     }
 
     /// <summary>Lists the passes of a period</summary>
@@ -36,12 +38,12 @@ public static class PassesApi
     /// Passes that reach into the period, whole, by AOS; one item for each antenna and link. closes=true keeps those with at
     /// least one usable second of positive margin.
     /// </remarks>
-    private static IResult List(
+    private static Ok<PassListResponse> List(
         HttpRequest request,
         ModelCache cache,
         TimeProvider clock,
-        CancellationToken cancellation,
-        [AsParameters] PassListParameters parameters)
+        [AsParameters] PassListParameters parameters,
+        CancellationToken cancellation)
     {
         PlanningModel model = cache.Current();
         var nowUtc = UtcInstant.From(clock.GetUtcNow());
@@ -77,20 +79,19 @@ public static class PassesApi
 
     /// <summary>Reads one pass</summary>
     /// <remarks>The pass of the spacecraft over the station that contains the instant; by the link of the highest yield when none is named.</remarks>
-    private static IResult Get(
+    private static Ok<PassDetailResponse> Get(
         string spacecraft,
         string station,
         string instantUtc,
         HttpRequest request,
         ModelCache cache,
-        CancellationToken cancellation,
-        [AsParameters] PassLinkParameters parameters)
+        [AsParameters] PassLinkParameters parameters,
+        CancellationToken cancellation)
     {
         (PlanningModel model, IReadOnlyList<PredictedPass> all) = Find(spacecraft, station, instantUtc, cache, cancellation);
         PredictedPass predicted = Choose(all, new QueryReader(request.Query), "antenna", "link");
         PassAddress address = PassWriter.AddressOf(predicted);
-        (double sunAzimuthDeg, double sunElevationDeg) = SunPosition.Look(
-            model.FrameOf(predicted.Station), predicted.Pass.MaximumElevationUtc, cache.Ut1MinusUtcS);
+        LookAngles sun = SunPosition.Look(predicted.Pass.MaximumElevationUtc, model.FrameOf(predicted.Station), cache.Ut1MinusUtcS);
         return TypedResults.Ok(new PassDetailResponse(PassWriter.Item(predicted))
         {
             BudgetUrl = address.Of("/budget"),
@@ -101,7 +102,7 @@ public static class PassesApi
             Waveforms = [.. predicted.Chain.Ladder.Waveforms.Select((_, index) => WaveformOf(predicted.Chain, index))],
             MostRobustWaveform = predicted.Chain.Ladder.MostRobust,
             BestUtc = predicted.Assessment.BestUtc.ToString(),
-            Sun = new SunResponse { AzimuthDeg = Math.Round(sunAzimuthDeg, 3), ElevationDeg = Math.Round(sunElevationDeg, 3) },
+            Sun = new SunResponse { AzimuthDeg = Math.Round(sun.AzimuthDeg, 3), ElevationDeg = Math.Round(sun.ElevationDeg, 3) },
             Alternatives = [.. all.Where(p => p != predicted).Select(AlternativeOf)],
             Models = ModelsUsed.For(cache.Ut1MinusUtcS),
         });
@@ -115,8 +116,8 @@ public static class PassesApi
         string instantUtc,
         HttpRequest request,
         ModelCache cache,
-        CancellationToken cancellation,
-        [AsParameters] TimelineParameters parameters)
+        [AsParameters] TimelineParameters parameters,
+        CancellationToken cancellation)
     {
         (PlanningModel model, IReadOnlyList<PredictedPass> all) = Find(spacecraft, station, instantUtc, cache, cancellation);
         var reader = new QueryReader(request.Query);
@@ -133,14 +134,14 @@ public static class PassesApi
 
     /// <summary>Reads the link budget of a pass at one instant</summary>
     /// <remarks>Terms in order; they add up to the timeline's margin. At the best second when no instant is named.</remarks>
-    private static IResult Budget(
+    private static Ok<BudgetResponse> Budget(
         string spacecraft,
         string station,
         string instantUtc,
         HttpRequest request,
         ModelCache cache,
-        CancellationToken cancellation,
-        [AsParameters] BudgetParameters parameters)
+        [AsParameters] BudgetParameters parameters,
+        CancellationToken cancellation)
     {
         (PlanningModel model, IReadOnlyList<PredictedPass> all) = Find(spacecraft, station, instantUtc, cache, cancellation);
         var reader = new QueryReader(request.Query);
@@ -167,14 +168,14 @@ public static class PassesApi
 
     /// <summary>Reads where to point and which frequency to expect</summary>
     /// <remarks>Apparent elevation and Doppler-corrected frequency, as columns.</remarks>
-    private static IResult Pointing(
+    private static Ok<PointingResponse> Pointing(
         string spacecraft,
         string station,
         string instantUtc,
         HttpRequest request,
         ModelCache cache,
-        CancellationToken cancellation,
-        [AsParameters] PointingParameters parameters)
+        [AsParameters] PointingParameters parameters,
+        CancellationToken cancellation)
     {
         (PlanningModel model, IReadOnlyList<PredictedPass> all) = Find(spacecraft, station, instantUtc, cache, cancellation);
         var reader = new QueryReader(request.Query);

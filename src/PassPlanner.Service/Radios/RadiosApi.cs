@@ -1,3 +1,4 @@
+using Microsoft.AspNetCore.Http.HttpResults;
 using PassPlanner.Physics.Antennas;
 using PassPlanner.Physics.Links;
 using PassPlanner.Service.Passes;
@@ -12,13 +13,13 @@ public static class RadiosApi
     /// <summary>Maps the routes.</summary>
     public static void MapRadioQuestions(this IEndpointRouteBuilder routes)
     {
-        routes.MapPost("/patterns/evaluate", EvaluatePattern).WithTags("Questions").Produces<PatternAnswer>().Problems(400);
-        routes.MapPost("/budgets", EvaluateBudget).WithTags("Questions").Produces<BudgetAnswer>().Problems(400);
+        routes.MapPost("/patterns/evaluate", EvaluatePattern).WithTags("Questions").Problems(400);
+        routes.MapPost("/budgets", EvaluateBudget).WithTags("Questions").Problems(400);
     }
 
     /// <summary>Evaluates an antenna pattern</summary>
     /// <remarks>Gain at the angles asked for, directivity by integration over the sphere, beamwidth, first sidelobe, effective area.</remarks>
-    private static IResult EvaluatePattern(Submitted<PatternQuestion> question)
+    private static Ok<PatternAnswer> EvaluatePattern(Submitted<PatternQuestion> question)
     {
         PatternQuestion asked = question.Document;
         var errors = new FieldErrors();
@@ -57,7 +58,7 @@ public static class RadiosApi
 
     /// <summary>Works out the budget of a link with fixed geometry</summary>
     /// <remarks>Every line with its unit and source; the sums follow from the terms.</remarks>
-    private static IResult EvaluateBudget(Submitted<BudgetQuestion> question)
+    private static Ok<BudgetAnswer> EvaluateBudget(Submitted<BudgetQuestion> question)
     {
         BudgetQuestion asked = question.Document;
         var errors = new FieldErrors();

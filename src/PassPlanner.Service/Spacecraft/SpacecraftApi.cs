@@ -1,3 +1,4 @@
+using Microsoft.AspNetCore.Http.HttpResults;
 using PassPlanner.Service.Problems;
 using PassPlanner.Service.Profiles;
 using PassPlanner.Service.Validation;
@@ -13,22 +14,22 @@ public static class SpacecraftApi
     public static void MapSpacecraft(this IEndpointRouteBuilder routes)
     {
         RouteGroupBuilder group = routes.MapGroup("/spacecraft").WithTags("Spacecraft");
-        group.MapGet("", List).Produces<ProfileList<SpacecraftDocument>>().Problems(400);
-        group.MapPost("", Create).Produces<SpacecraftDocument>(201).Problems(400, 409);
-        group.MapGet("/{id}", Get).Produces<SpacecraftDocument>().Problems(404);
-        group.MapPut("/{id}", Update).Produces<SpacecraftDocument>().Problems(400, 404, 412, 428);
-        group.MapDelete("/{id}", Delete).Produces(204).Problems(404, 409, 412);
-        group.MapGet("/{id}/revisions", Revisions).Produces<ProfileList<RevisionResponse>>().Problems(404);
-        group.MapGet("/{id}/revisions/{revision:int}", Revision).Produces<SpacecraftDocument>().Problems(404);
+        group.MapGet("", List).Problems(400);
+        group.MapPost("", Create).Problems(400, 409);
+        group.MapGet("/{id}", Get).Problems(404);
+        group.MapPut("/{id}", Update).Problems(400, 404, 412, 428);
+        group.MapDelete("/{id}", Delete).Problems(404, 409, 412);
+        group.MapGet("/{id}/revisions", Revisions).Problems(404);
+        group.MapGet("/{id}/revisions/{revision:int}", Revision).Problems(404);
     }
 
     /// <summary>Lists the spacecraft</summary>
-    private static IResult List(HttpRequest request, SpacecraftProfiles profiles, [AsParameters] ListParameters parameters) =>
+    private static Ok<ProfileList<SpacecraftDocument>> List(HttpRequest request, SpacecraftProfiles profiles, [AsParameters] ListParameters parameters) =>
         TypedResults.Ok(profiles.List(request.Query));
 
     /// <summary>Adds a spacecraft</summary>
     /// <remarks>The identifier is made from the name when left out. Element sets are posted to its own address.</remarks>
-    private static IResult Create(Submitted<SpacecraftDocument> body, SpacecraftProfiles profiles, HttpResponse response)
+    private static Created<SpacecraftDocument> Create(Submitted<SpacecraftDocument> body, SpacecraftProfiles profiles, HttpResponse response)
     {
         SpacecraftDocument created = profiles.Create(body.Document);
         response.Headers.ETag = EntityTag.Of(created.Revision!.Value);
@@ -36,7 +37,7 @@ public static class SpacecraftApi
     }
 
     /// <summary>Reads a spacecraft</summary>
-    private static IResult Get(string id, SpacecraftProfiles profiles, HttpResponse response)
+    private static Ok<SpacecraftDocument> Get(string id, SpacecraftProfiles profiles, HttpResponse response)
     {
         SpacecraftDocument found = profiles.Get(id);
         response.Headers.ETag = EntityTag.Of(found.Revision!.Value);
@@ -45,7 +46,7 @@ public static class SpacecraftApi
 
     /// <summary>Changes a spacecraft</summary>
     /// <remarks>Needs If-Match with the ETag of the revision that was read; makes a new revision, and keeps the earlier ones.</remarks>
-    private static IResult Update(
+    private static Ok<SpacecraftDocument> Update(
         string id, Submitted<SpacecraftDocument> body, SpacecraftProfiles profiles, HttpRequest request, HttpResponse response)
     {
         SpacecraftDocument updated = profiles.Update(id, EntityTag.Required(request), body.Document);
@@ -55,15 +56,15 @@ public static class SpacecraftApi
 
     /// <summary>Deletes a spacecraft</summary>
     /// <remarks>Refused while it has element sets, unless cascade=true.</remarks>
-    private static IResult Delete(string id, SpacecraftProfiles profiles, HttpRequest request, [AsParameters] DeleteParameters parameters)
+    private static NoContent Delete(string id, SpacecraftProfiles profiles, HttpRequest request, [AsParameters] DeleteParameters parameters)
     {
         profiles.Delete(id, request);
         return TypedResults.NoContent();
     }
 
     /// <summary>Lists the revisions of a spacecraft</summary>
-    private static IResult Revisions(string id, SpacecraftProfiles profiles) => TypedResults.Ok(profiles.Revisions(id));
+    private static Ok<ProfileList<RevisionResponse>> Revisions(string id, SpacecraftProfiles profiles) => TypedResults.Ok(profiles.Revisions(id));
 
     /// <summary>Reads an earlier revision of a spacecraft</summary>
-    private static IResult Revision(string id, int revision, SpacecraftProfiles profiles) => TypedResults.Ok(profiles.GetRevision(id, revision));
+    private static Ok<SpacecraftDocument> Revision(string id, int revision, SpacecraftProfiles profiles) => TypedResults.Ok(profiles.GetRevision(id, revision));
 }

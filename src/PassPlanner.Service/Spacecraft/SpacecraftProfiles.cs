@@ -12,7 +12,7 @@ public sealed class SpacecraftProfiles(PlannerDatabase database, TimeProvider cl
     protected override SpacecraftDocument WithIdentifiers(SpacecraftDocument document) => SpacecraftMapper.WithIdentifiers(document);
 
     /// <inheritdoc/>
-    protected override string IdOf(SpacecraftDocument document) => document.Id!;
+    protected override string? IdOf(SpacecraftDocument document) => document.Id;
 
     /// <inheritdoc/>
     protected override int CatalogNumberOf(SpacecraftDocument document) => document.CatalogNumber ?? 0;

@@ -13,7 +13,7 @@ public sealed class StationProfiles(PlannerDatabase database, TimeProvider clock
     protected override StationDocument WithIdentifiers(StationDocument document) => StationMapper.WithIdentifiers(document);
 
     /// <inheritdoc/>
-    protected override string IdOf(StationDocument document) => document.Id!;
+    protected override string? IdOf(StationDocument document) => document.Id;
 
     /// <inheritdoc/>
     protected override StationDocument WithId(StationDocument document, string id) => document with { Id = id };

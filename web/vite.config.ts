@@ -1,5 +1,5 @@
 import { defineConfig } from 'vitest/config';
-import { mockApi } from './test/mock/plugin';
+import { mockApi } from './test/mock/plugin.ts';
 
 const serviceUrl = 'http://127.0.0.1:5080';
 

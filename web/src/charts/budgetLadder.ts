@@ -6,23 +6,24 @@ import { ladderRows, leastWrittenDb, type LadderRow } from './ladderArithmetic';
 import { valueScale } from './chartFrame';
 
 const rowPx = 25;
-const stairPx = 230;
 const edgePx = 8;
+/** Room at the left for the figure of the deepest step. */
+const labelPx = 40;
 
 /** Every line of the budget in order with its value and source; beside it the staircase of what changed since the best second. */
-export function budgetLadder(best: Budget, now: Budget, zone: Zone): HTMLElement {
+export function budgetLadder(best: Budget, now: Budget, zone: Zone, stairPx: number): HTMLElement {
   const rows = ladderRows(best, now);
   const levels = [best.marginDb, now.requiredMarginDb, ...rows.map((row) => row.levelDb)];
   const lowest = Math.min(...levels);
   const highest = Math.max(...levels);
-  const across = valueScale(highest, lowest, 40, stairPx - 40 - edgePx);
+  const across = valueScale(highest, lowest, labelPx, stairPx - labelPx - edgePx);
   const head = (text: string, side = '') => h('th', { scope: 'col', class: side }, text);
   const bestRow = h('tr', { class: 'sum' }, h('th', { scope: 'row' }, `Best second, ${clockTime(Date.parse(best.atUtc), zone)}`), h('td', { class: 'right' }, fixed(best.marginDb, 2)),
-    stairCell(startMark(across(best.marginDb)), across(now.requiredMarginDb)));
+    stairCell(startMark(across(best.marginDb)), across(now.requiredMarginDb), stairPx));
   let levelDb = best.marginDb;
   const body = rows.map((row, index) => {
     const isLast = index === rows.length - 1;
-    const cell = stairCell(step(row, levelDb, across, isLast), across(now.requiredMarginDb), isLast ? `required ${fixed(now.requiredMarginDb, 1)}` : undefined);
+    const cell = stairCell(step(row, levelDb, across, isLast), across(now.requiredMarginDb), stairPx, isLast ? `required ${fixed(now.requiredMarginDb, 1)}` : undefined);
     levelDb = row.levelDb;
     return h('tr', { class: row.line.kind === 'sum' ? (isLast ? 'sum last' : 'sum') : '' },
       h('th', { scope: 'row' }, lineName(row, isLast)),
@@ -43,7 +44,7 @@ function value(row: LadderRow, isLast: boolean): string {
   return isLast ? fixed(row.line.valueDb, 2) : signed(row.line.valueDb, 2);
 }
 
-function stairCell(marks: readonly SVGElement[], requiredX: number, requiredText?: string): HTMLElement {
+function stairCell(marks: readonly SVGElement[], requiredX: number, stairPx: number, requiredText?: string): HTMLElement {
   const height = requiredText === undefined ? rowPx : rowPx + 18;
   const text = requiredText === undefined ? [] : [s('text', { class: 'ink-text', 'text-anchor': requiredX < 60 ? 'start' : requiredX > stairPx - 60 ? 'end' : 'middle', x: requiredX, y: height - 2 }, requiredText)];
   return h('td', { class: 'stair' }, s('svg', { width: stairPx, height, viewBox: `0 0 ${stairPx} ${height}`, 'aria-hidden': 'true' },

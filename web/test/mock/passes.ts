@@ -1,7 +1,7 @@
 import type { LinkReference, Pass, PassDetail, TimeWindow, Verdict } from '../../src/api/passes';
 import type { Budget, BudgetLine, Timeline } from '../../src/api/timeline';
-import { look, rises } from './orbit';
-import { frequencyHz, type MockSpacecraft, type MockStation } from './scenario';
+import { look, rises } from './orbit.ts';
+import { frequencyHz, type MockSpacecraft, type MockStation } from './scenario.ts';
 
 const waveforms = {
   x: [['QPSK 1/2', 12.5e6, 1.05], ['QPSK 3/4', 18.75e6, 2.31], ['8PSK 2/3', 25e6, 3.65], ['16APSK 3/4', 37.5e6, 5.49]],

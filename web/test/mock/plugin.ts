@@ -1,7 +1,7 @@
 import type { Plugin } from 'vite';
 import type { JsonObject } from '../../src/api/profiles';
-import { budget, passDetail, passItem, servedPasses, timeline } from './passes';
-import { scenario, startMs, type Scenario } from './scenario';
+import { budget, passDetail, passItem, servedPasses, timeline } from './passes.ts';
+import { scenario, startMs, type Scenario } from './scenario.ts';
 
 interface Reply {
   readonly status: number;

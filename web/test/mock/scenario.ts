@@ -1,5 +1,5 @@
 import type { JsonObject } from '../../src/api/profiles';
-import type { CircularOrbit } from './orbit';
+import type { CircularOrbit } from './orbit.ts';
 
 export interface MockSpacecraft {
   readonly document: JsonObject & { readonly id: string; readonly name: string };

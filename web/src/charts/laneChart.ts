@@ -57,9 +57,11 @@ export function laneChart(input: LaneChartInput): LaneChart {
   const element = s('svg', { class: 'lanes', width: input.widthPx, role: 'group', 'aria-label': 'Passes by antenna; arrow keys move between passes' });
   const behind = s('g', {});
   const front = s('g', {});
-  element.append(behind, front);
+  const inside = s('rect', { x: gutterPx, y: 0, width: input.widthPx - gutterPx });
+  element.append(s('defs', {}, s('clipPath', { id: 'lanes-inside' }, inside)), behind, front);
 
   const links: LaneLink[] = [];
+  const hills = s('g', { 'clip-path': 'url(#lanes-inside)' });
   let y = headPx;
   for (const [laneIndex, lane] of input.lanes.entries()) {
     const boxes = lane.passes.map((entry) => boxOf(entry, scale, labelled));
@@ -68,16 +70,18 @@ export function laneChart(input: LaneChartInput): LaneChart {
     front.append(...laneHead(lane, y), s('path', { class: lane.beginsStation ? 'lane-rule' : 'grid', d: `M${lane.beginsStation ? 0 : gutterPx} ${y + 0.5}H${input.widthPx}` }));
     for (const [index, entry] of lane.passes.entries()) {
       const row = layout.rows[index] ?? 0;
-      const link = passLink(entry, scale, y + (layout.baselines[row] ?? 0), labelled);
       const box = boxes[index];
-      links.push({ link, laneIndex, middle: box === undefined ? 0 : (box.left + box.right) / 2 });
-      front.append(link);
+      if (box === undefined) continue;
+      const link = passLink(entry, box, scale, y + (layout.baselines[row] ?? 0), labelled);
+      links.push({ link, laneIndex, middle: (box.left + box.right) / 2 });
+      hills.append(link);
     }
     y += layout.height;
   }
-  front.append(s('path', { class: 'lane-rule', d: `M0 ${y + 0.5}H${input.widthPx}` }));
+  front.append(hills, s('path', { class: 'lane-rule', d: `M0 ${y + 0.5}H${input.widthPx}` }));
   behind.append(...timeGrid(scale, y, input));
   element.setAttribute('height', String(y + 1));
+  inside.setAttribute('height', String(y));
   element.setAttribute('viewBox', `0 0 ${input.widthPx} ${y + 1}`);
   roveByArrows(element, links);
 
@@ -96,39 +100,50 @@ export function laneChart(input: LaneChartInput): LaneChart {
   };
 }
 
-function boxOf(entry: LanePass, scale: TimeScale, labelled: boolean): LaneBox {
+interface PassBox extends LaneBox {
+  readonly rise: number;
+  readonly nameX: number;
+  readonly worthX: number;
+  readonly worthAnchor: 'start' | 'end';
+}
+
+/** Where a pass and its labels stand; at the right edge the labels keep inside the frame. */
+function boxOf(entry: LanePass, scale: TimeScale, labelled: boolean): PassBox {
   const { pass } = entry;
   const left = scale.x(Date.parse(pass.aosUtc));
-  const right = scale.x(Date.parse(pass.losUtc));
+  const right = Math.max(scale.x(Date.parse(pass.losUtc)), left + 5);
   const isHill = right - left >= narrowestHillPx && pass.marginProfile !== undefined;
   const excessDb = Math.min(highestExcessDb, pass.highestMarginDb - pass.requiredMarginDb);
   const rise = isHill ? Math.max(2, excessDb * look.pxPerDb) : 13;
-  if (!labelled) return { left, right: Math.max(right, left + 5), above: rise, below: hillUnderPx };
-  const nameRight = left + textWidth(entry.label, labelPx, 650);
-  const worthRight = Math.max(right, left + 5) + 4 + textWidth(worth(pass), labelPx, 400);
+  if (!labelled) return { left, right, rise, above: rise, below: hillUnderPx, nameX: left, worthX: right, worthAnchor: 'start' };
+  const timingErrorMs = pass.elementSet.isStale ? (pass.elementSet.timingErrorS ?? 0) * 1000 : 0;
+  const whiskerPx = scale.x(scale.fromMs + timingErrorMs) - scale.left;
+  const nameWidth = textWidth(entry.label, labelPx, 650);
+  const worthWidth = textWidth(worth(pass), labelPx, 400) + 4;
+  const nameX = Math.max(scale.left + 2, Math.min(left, scale.right - nameWidth));
+  const fitsRight = right + whiskerPx + worthWidth <= scale.right;
   return {
-    left,
-    right: Math.max(nameRight, worthRight),
+    rise, nameX,
+    worthX: fitsRight ? right + whiskerPx + 4 : left - whiskerPx - 4, worthAnchor: fitsRight ? 'start' : 'end',
+    left: Math.min(nameX, fitsRight ? left - whiskerPx : left - whiskerPx - worthWidth),
+    right: Math.max(nameX + nameWidth, fitsRight ? right + whiskerPx + worthWidth : right + whiskerPx),
     above: rise + labelPx + 6,
     below: isHill ? -lowestExcessDb * look.pxPerDb + 2 : hillUnderPx + 6,
   };
 }
 
-function passLink(entry: LanePass, scale: TimeScale, baseline: number, labelled: boolean): SVGAElement {
+function passLink(entry: LanePass, box: PassBox, scale: TimeScale, baseline: number, labelled: boolean): SVGAElement {
   const { pass } = entry;
   const left = scale.x(Date.parse(pass.aosUtc));
   const right = Math.max(scale.x(Date.parse(pass.losUtc)), left + 5);
-  const excessDb = Math.max(0, Math.min(highestExcessDb, pass.highestMarginDb - pass.requiredMarginDb));
-  const rise = right - left >= narrowestHillPx ? excessDb * look.pxPerDb : 12;
-  const quiet = pass.usableS === 0;
   const link = s('a', { class: 'lane-pass', href: entry.url, 'data-key': entry.key, 'aria-label': entry.spoken, tabindex: '-1', transform: `translate(0 ${baseline})` },
     s('title', {}, entry.spoken),
-    s('rect', { class: 'hit', x: left - 3, y: -rise - 18, width: right - left + 6, height: rise + 34 }),
+    s('rect', { class: 'hit', x: left - 3, y: -box.rise - 18, width: right - left + 6, height: box.rise + 34 }),
     hillRibbon(pass, scale.x, look));
   if (labelled) {
-    link.append(s('text', { class: quiet ? 'name quiet-name' : 'name', x: left, y: -rise - 5 }, entry.label));
-    link.append(s('text', { class: 'ink2-text', x: right + 4, y: 11 }, worth(pass)));
-    if (pass.elementSet.isStale) link.querySelector('.name')?.classList.add('stale-name');
+    link.append(
+      s('text', { class: pass.usableS === 0 ? 'name quiet-name' : 'name', x: box.nameX, y: -box.rise - 5 }, entry.label), ' ',
+      s('text', { class: 'ink2-text', 'text-anchor': box.worthAnchor, x: box.worthX, y: 11 }, worth(pass)));
   }
   return link;
 }

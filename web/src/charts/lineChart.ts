@@ -3,7 +3,7 @@ import { short, type Quantity } from '../format/number';
 import { columnPath, valueScale, type ChartFrame, type StackedChart } from './chartFrame';
 import { gutter } from './gutter';
 import { at, timeOf, type PassData } from './passData';
-import { valueTicks } from './timeScale';
+import { roundStep } from './timeScale';
 
 export interface LineSpec {
   readonly name: string;
@@ -45,14 +45,13 @@ export function lineChart(data: PassData, frame: ChartFrame, spec: LineSpec): St
   };
 }
 
-/** Three round values that enclose the column. */
+/** Two or three round intervals that enclose the column. */
 function spread(values: readonly number[], lowest?: number, highest?: number): number[] {
   const low = lowest ?? Math.min(...values);
   const high = Math.max(highest ?? -Infinity, ...values);
-  const inner = valueTicks(low, high > low ? high : low + 1, 3);
-  const step = (inner[1] ?? 1) - (inner[0] ?? 0) || 1;
-  const first = Math.floor(low / step + 1e-9) * step;
+  const step = roundStep(high - low || Math.abs(high) || 1, 2);
+  const last = Math.ceil(high / step - 1e-9);
   const ticks: number[] = [];
-  for (let tick = first; tick < high + step * (1 - 1e-9); tick += step) ticks.push(Number(tick.toPrecision(12)));
+  for (let index = Math.floor(low / step + 1e-9); index <= last; index++) ticks.push(Number((index * step).toPrecision(12)));
   return ticks;
 }

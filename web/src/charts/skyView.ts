@@ -146,14 +146,20 @@ function minuteTicks(data: PassData, zone: Zone): SVGElement[] {
   return elements;
 }
 
+/** AOS and LOS with their azimuths outside the rim, clear of the letters of the compass. */
 function endNames(data: PassData): SVGElement[] {
   const name = (index: number, text: string) => {
     const azimuthDeg = at(data.timeline.azimuthDeg, index);
     const { x, y } = skyPoint(azimuthDeg, 0);
-    const sine = Math.sin(azimuthDeg * degree);
-    const anchor = sine > 0.25 ? '' : sine < -0.25 ? 'end' : 'middle';
-    const isBesideLetter = Math.abs(Math.sin(2 * azimuthDeg * degree)) < 0.25;
-    return s('text', { class: `ink-text ${anchor}`, x: x + 8 * sine, y: y - 8 * Math.cos(azimuthDeg * degree) + 4 + (isBesideLetter ? 16 : 0) }, text);
+    const [sine, cosine] = [Math.sin(azimuthDeg * degree), Math.cos(azimuthDeg * degree)];
+    const isByNorthOrSouth = Math.abs(sine) < 0.22;
+    const isByEastOrWest = Math.abs(cosine) < 0.12;
+    const side = sine >= 0 ? 1 : -1;
+    return s('text', {
+      class: side > 0 ? 'ink-text' : 'ink-text end',
+      x: isByNorthOrSouth ? centrePx + side * Math.max(16, Math.abs(x - centrePx) + 4) : x + 8 * sine,
+      y: y - 8 * cosine + 4 + (isByNorthOrSouth ? -6 * cosine : 0) + (isByEastOrWest ? (cosine > 0 ? -14 : 18) : 0),
+    }, text);
   };
   const last = data.count - 1;
   return [

@@ -32,12 +32,18 @@ export function timeTicks(scale: TimeScale, leastPx: number, offsetMs = 0): numb
 
 const niceFactors = [1, 2, 2.5, 5, 10];
 
+/** A round step that parts a span into `count` intervals or fewer. */
+export function roundStep(span: number, count: number): number {
+  const rough = span / count;
+  if (!(rough > 0)) return 1;
+  const power = 10 ** Math.floor(Math.log10(rough));
+  return power * (niceFactors.find((factor) => factor * power >= rough * 0.999) ?? 10);
+}
+
 /** Round values from low to high, `count` intervals or fewer. */
 export function valueTicks(low: number, high: number, count: number): number[] {
-  const rough = (high - low) / count;
-  if (!(rough > 0)) return [low];
-  const power = 10 ** Math.floor(Math.log10(rough));
-  const step = power * (niceFactors.find((factor) => factor * power >= rough * 0.999) ?? 10);
+  if (!(high > low)) return [low];
+  const step = roundStep(high - low, count);
   const ticks: number[] = [];
   for (let index = Math.ceil(low / step - 1e-9); index * step <= high + step * 1e-9; index++) ticks.push(Number((index * step).toPrecision(12)));
   return ticks;

@@ -176,8 +176,9 @@ function memberSlot(parent: Slot, key: string): Slot {
 function partShell(label: string, hint: string | undefined, path: string, context: FormContext, body: HTMLElement, ...tools: Child[]): HTMLElement {
   const message = h('p', { class: 'field-error', tabindex: '-1', role: 'status' });
   context.places.set(path, { message, control: undefined });
-  return h('section', { class: 'part', 'aria-label': label },
-    h('div', { class: 'part-head' }, h('h3', {}, label), hint !== undefined && h('span', { class: 'faint small' }, hint), h('span', { class: 'part-tools' }, tools)), message, body);
+  const isOuter = !path.includes('/');
+  return h('div', { class: 'part', role: 'group', 'aria-label': label },
+    h('div', { class: 'part-head' }, h(isOuter ? 'h2' : 'h3', {}, label), hint !== undefined && h('span', { class: 'faint small' }, hint), h('span', { class: 'part-tools' }, tools)), message, body);
 }
 
 function smallButton(text: string, spoken: string, act: () => void): HTMLButtonElement {

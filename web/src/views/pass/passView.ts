@@ -1,7 +1,7 @@
 import { planner, wireInstant, type PassAddress } from '../../api/planner';
 import type { Problem } from '../../api/problem';
 import type { Budget } from '../../api/timeline';
-import { nowMs, whileVisible } from '../../app/clock';
+import { nowMs, setServiceTime, whileVisible } from '../../app/clock';
 import { setPageTitle, type View } from '../../app/view';
 import { onZoneChange, zone, zoneOffsetMs } from '../../app/zone';
 import { budgetLadder } from '../../charts/budgetLadder';
@@ -68,9 +68,10 @@ class PassPage {
   private async load(): Promise<void> {
     const { signal } = this.request;
     try {
-      const [pass, timeline, budget] = await Promise.all([
-        planner.pass(this.address, signal), planner.timeline(this.address, signal), planner.budget(this.address, undefined, signal),
+      const [status, pass, timeline, budget] = await Promise.all([
+        planner.status(signal), planner.pass(this.address, signal), planner.timeline(this.address, signal), planner.budget(this.address, undefined, signal),
       ]);
+      if (status.ok) setServiceTime(status.value.nowUtc);
       const failed = [pass, timeline, budget].find((answer) => !answer.ok);
       if (pass.ok && timeline.ok && budget.ok) {
         this.data = passData(pass.value, timeline.value);
@@ -151,7 +152,7 @@ class PassPage {
       else this.openRows.delete(name);
     }
     const focusedRow = frame.contains(document.activeElement) ? document.activeElement?.textContent : undefined;
-    replace(frame, budgetLadder(best, budget, zone(), phone.matches ? 140 : 220));
+    replace(frame, budgetLadder(best, budget, zone(), phone.matches ? 130 : 190));
     for (const details of frame.querySelectorAll('details')) {
       const summary = details.querySelector('summary');
       details.open = this.openRows.has(summary?.textContent ?? '');

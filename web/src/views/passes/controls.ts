@@ -10,12 +10,17 @@ export interface ControlInput {
   readonly onChange: (selection: Selection) => void;
 }
 
-/** The filters over the passes. A phone shows one station at a time, so it offers no "all". */
-export function passControls(input: ControlInput): HTMLElement {
+/** The choice of station. A phone shows one station at a time, so there it offers no "all". */
+export function stationControl(input: ControlInput): HTMLElement {
   const { selection, onChange } = input;
-  const station = picker('Station', input.isPhone ? undefined : 'All stations', input.stations, selection.station, (value) => {
+  return picker('Station', input.isPhone ? undefined : 'All stations', input.stations, selection.station, (value) => {
     onChange({ ...selection, station: value });
   });
+}
+
+/** The other filters over the passes; a phone's list has no period to choose. */
+export function passControls(input: ControlInput): HTMLElement[] {
+  const { selection, onChange } = input;
   const spacecraft = picker('Spacecraft', 'All spacecraft', input.spacecraft, selection.spacecraft, (value) => {
     onChange({ ...selection, spacecraft: value });
   });
@@ -28,7 +33,11 @@ export function passControls(input: ControlInput): HTMLElement {
   const closing = switchOf('Which passes', 'closing', [{ value: 'false', name: 'All' }, { value: 'true', name: 'Closing only' }], String(selection.closingOnly), (value) => {
     onChange({ ...selection, closingOnly: value === 'true' });
   });
-  return h('div', { class: 'controls', role: 'group', 'aria-label': 'Filters' }, station, spacecraft, direction, !input.isPhone && period, closing);
+  return input.isPhone ? [spacecraft, direction, closing] : [spacecraft, direction, period, closing];
+}
+
+export function filterGroup(...controls: Node[]): HTMLElement {
+  return h('div', { class: 'controls', role: 'group', 'aria-label': 'Filters' }, controls);
 }
 
 function periodName(hours: PeriodH): string {

@@ -47,7 +47,7 @@ export function lanesInFrame(rows: readonly AntennaRow[], fromMs: number, toMs: 
       latitudeDeg: row.station.position.latitudeDeg, longitudeDeg: row.station.position.longitudeDeg,
       beginsStation: rows[index - 1]?.station !== row.station,
       summary: inFrame.length === 0 ? 'no passes' : `${closing} of ${inFrame.length} close`,
-      passes: inFrame.map((pass) => ({ key: passKey(pass), url: passPageUrl(pass), label: labelOf(pass, inFrame), spoken: spoken(pass), pass })),
+      passes: inFrame.map((pass) => ({ key: passKey(pass), url: passPageUrl(pass), label: labelOf(pass, inFrame), spoken: spoken(pass, labelOf(pass, inFrame)), pass })),
     };
   });
 }
@@ -59,7 +59,8 @@ function labelOf(pass: Pass, others: readonly Pass[]): string {
   return shared ? `${pass.spacecraftName} ${pass.link.radio}` : pass.spacecraftName;
 }
 
-function spoken(pass: Pass): string {
+/** Begins with what is seen, so that a voice command can name it. */
+function spoken(pass: Pass, label: string): string {
   const usable = pass.usableS > 0 ? `, ${duration(pass.usableS)} usable` : '';
-  return `${pass.spacecraftName} over ${pass.stationName}, ${pass.antennaName}, ${pass.link.direction}, ${clockTime(Date.parse(pass.aosUtc), zone())}: ${verdict(pass.verdict).toLowerCase()}${usable}, ${worth(pass)}`;
+  return `${label} ${worth(pass)}, over ${pass.stationName}, ${pass.antennaName}, ${pass.link.direction}, ${clockTime(Date.parse(pass.aosUtc), zone())}: ${verdict(pass.verdict).toLowerCase()}${usable}`;
 }

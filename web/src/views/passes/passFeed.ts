@@ -27,6 +27,7 @@ export function feedPeriod(spanH: number): { fromMs: number; toMs: number } {
 
 /**
  * Asks for status, profiles and the first page of passes at once; further pages follow, each handed on as it comes.
+ * A device whose clock is wrong asks again by the service's.
  */
 export async function loadFeed(spanH: number, signal: AbortSignal, onPart: (feed: PassFeed) => void): Promise<FeedAnswer> {
   const { fromMs, toMs } = feedPeriod(spanH);
@@ -39,6 +40,8 @@ export async function loadFeed(spanH: number, signal: AbortSignal, onPart: (feed
   if (!spacecraft.ok) return spacecraft;
   if (!first.ok) return first;
   setServiceTime(status.value.nowUtc);
+  const isDeviceClockOff = Math.abs(feedPeriod(spanH).fromMs - fromMs) > quarterHourMs;
+  if (isDeviceClockOff) return loadFeed(spanH, signal, onPart);
 
   let feed: PassFeed = {
     fromMs, toMs, passes: first.value.items, withoutPasses: first.value.withoutPasses,

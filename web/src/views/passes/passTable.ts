@@ -51,17 +51,17 @@ function row(pass: Pass, isFirst: boolean, waitCell: HTMLElement, nowMs: number,
   const closes = pass.usableS > 0;
   const aosMs = Date.parse(pass.aosUtc);
   const day: Child = sameDay(aosMs, nowMs, zone()) ? undefined : h('span', { class: 'faint' }, `${dayMonth(aosMs, zone())} `);
-  const time = isFirst
-    ? h('a', { href: url, 'data-key': `row ${passKey(pass)}` }, pass.aosIsOpen ? 'up before ' : '', day, clockTime(aosMs, zone()))
-    : h('a', { href: url, 'data-key': `row ${passKey(pass)}` }, h('span', { class: 'hidden-text' }, `${pass.spacecraftName} ${clockTime(aosMs, zone())}, ${pass.antennaName}`), 'or');
-  const antenna = showsDirection ? `${pass.stationName}, ${pass.antennaName}, ${pass.link.direction}` : `${pass.stationName}, ${pass.antennaName}`;
+  const link = { href: url, 'data-key': `row ${passKey(pass)}` };
+  const time = isFirst && h('a', link, pass.aosIsOpen ? 'up before ' : '', day, clockTime(aosMs, zone()));
+  const place = showsDirection ? `${pass.stationName}, ${pass.antennaName}, ${pass.link.direction}` : `${pass.stationName}, ${pass.antennaName}`;
+  const antenna = isFirst ? place : h('a', link, h('span', { class: 'hidden-text' }, `${pass.spacecraftName} ${clockTime(aosMs, zone())} over `), place);
   return h('tr', {
     class: [isFirst ? 'first' : '', closes ? '' : 'not-closing'].join(' '),
     onClick: (event: MouseEvent) => {
       if (event.target instanceof Element && event.target.closest('a') === null && getSelection()?.isCollapsed !== false) openRow(event);
     },
   },
-    h('th', { scope: 'row', class: 'time' }, time),
+    isFirst ? h('th', { scope: 'row', class: 'time' }, time) : h('td', {}),
     h('td', { class: 'wait' }, waitCell),
     h('td', { class: 'craft' }, isFirst && h('span', {}, pass.spacecraftName), isFirst && pass.elementSet.isStale && h('span', { class: 'caused' }, ` set ${age(pass.elementSet.ageH)}`)),
     h('td', { class: 'antenna' }, antenna),

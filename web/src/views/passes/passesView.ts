@@ -7,7 +7,7 @@ import { overviewStrip } from '../../charts/overviewStrip';
 import { h, replace } from '../../dom';
 import { count } from '../../format/words';
 import { empty, failure, skeleton, staleNotice } from '../states';
-import { legend, passControls } from './controls';
+import { filterGroup, legend, passControls, stationControl, type ControlInput } from './controls';
 import { demoNotice } from './demoNotice';
 import { headline, nextSentence, periodWords } from './headline';
 import { antennaRows, lanesInFrame, overviewRows } from './lanes';
@@ -130,27 +130,27 @@ class PassesPage {
     if (feed === undefined) {
       return [this.problem === undefined ? skeleton('Loading passes') : failure(this.problem, this.retry)];
     }
-    const notices = [
-      this.problem === undefined ? undefined : staleNotice(this.problem, this.retry),
-      feed.status.hasDemo ? demoNotice(this.retry) : undefined,
-    ];
+    const stale = this.problem === undefined ? undefined : staleNotice(this.problem, this.retry);
+    const demo = feed.status.hasDemo ? demoNotice(this.retry) : undefined;
+    const notices = [stale, demo];
     if (feed.stations.length === 0) return [...notices, empty('No stations yet', h('p', { class: 'quiet' }, 'A station is a place with one antenna or more. Passes show here once there is one, and a spacecraft with an element set.'), h('a', { class: 'button solid', href: '/stations/new' }, 'Add a station'))];
     if (feed.spacecraft.length === 0) return [...notices, empty('No spacecraft yet', h('p', { class: 'quiet' }, 'Passes show here once there is a spacecraft with a radio and an element set.'), h('a', { class: 'button solid', href: '/spacecraft/new' }, 'Add a spacecraft'))];
-    return [...notices, ...(phone.matches ? this.phoneContent(feed) : this.wideContent(feed))];
+    return phone.matches ? [stale, ...this.phoneContent(feed), demo] : [...notices, ...this.wideContent(feed)];
   }
 
-  private phoneContent(feed: PassFeed): Node[] {
+  private phoneContent(feed: PassFeed): (Node | undefined)[] {
     const station = feed.stations.find((entry) => entry.id === this.selection.station) ?? feed.stations[0];
     const selection = { ...this.selection, station: station?.id };
-    const passes = feed.passes.filter((pass) => isSelected(pass, selection));
-    const groups = groupPasses(passes);
-    const controls = passControls({ selection, stations: feed.stations, spacecraft: feed.spacecraft, isPhone: true, onChange: this.change });
+    const groups = groupPasses(feed.passes.filter((pass) => isSelected(pass, selection)));
+    const input: ControlInput = { selection, stations: feed.stations, spacecraft: feed.spacecraft, isPhone: true, onChange: this.change };
+    const filters = filterGroup(...passControls(input));
+    const stationPicker = filterGroup(stationControl(input));
     if (groups.every((group) => group.losMs <= nowMs())) {
-      return [controls, h('div', { class: 'state' }, h('h1', {}, 'No passes in the next 24\u2009h'), h('p', { class: 'quiet' }, `Over ${station?.name ?? 'this station'}, with these filters.`)), ...this.without(feed)];
+      return [stationPicker, h('div', { class: 'state' }, h('h1', {}, 'No passes in the next 24\u2009h'), h('p', { class: 'quiet' }, `Over ${station?.name ?? 'this station'}, with these filters.`)), filters, ...this.without(feed)];
     }
     const list = phoneList(groups, nowMs());
     this.ticking.push(list.setNow);
-    return [controls, list.element, ...this.without(feed)];
+    return [stationPicker, list.leading ?? h('h1', {}, 'No pass closes in the next 24\u2009h'), filters, list.following, ...this.without(feed)];
   }
 
   private wideContent(feed: PassFeed): Node[] {
@@ -161,11 +161,12 @@ class PassesPage {
     const selected = feed.passes.filter((pass) => isSelected(pass, this.selection));
     const groups = groupPasses(selected);
     const framed = groups.filter((group) => group.losMs > Math.max(fromMs, this.frameFromMs === undefined ? nowMs() : 0) && group.aosMs < toMs);
+    const input: ControlInput = { selection: this.selection, stations: feed.stations, spacecraft: feed.spacecraft, isPhone: false, onChange: this.change };
     const period = periodWords(fromMs, toMs, nowMs(), this.selection.periodH, this.frameFromMs === undefined, zone());
     return [
       h('h1', {}, headline(framed, period)),
       this.nextLine(groups),
-      passControls({ selection: this.selection, stations: feed.stations, spacecraft: feed.spacecraft, isPhone: false, onChange: this.change }),
+      filterGroup(stationControl(input), ...passControls(input)),
       legend(),
       this.charts(feed, selected, fromMs, toMs, isWhole),
       ...this.tables(framed),

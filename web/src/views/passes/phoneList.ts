@@ -10,7 +10,9 @@ import { passKey, passPageUrl, type PassGroup } from './passGroups';
 import { shown } from '../states';
 
 export interface PhoneList {
-  readonly element: HTMLElement;
+  /** The next pass that can be used, with its countdown; undefined when none can. */
+  readonly leading: HTMLElement | undefined;
+  readonly following: HTMLElement;
   readonly setNow: (nowMs: number) => void;
 }
 
@@ -18,13 +20,7 @@ export interface PhoneList {
 export function phoneList(groups: readonly PassGroup[], nowMs: number): PhoneList {
   const coming = groups.filter((group) => group.losMs > nowMs);
   const lead = coming.find((group) => group.best.usableS > 0);
-  const element = h('div', { class: 'phone-list' });
-  let setNow: (nowMs: number) => void = () => undefined;
-  if (lead !== undefined) {
-    const head = leading(lead);
-    element.append(head.element);
-    setNow = head.setNow;
-  }
+  const head = lead === undefined ? undefined : leading(lead);
   const items = h('ol', { class: 'phone-passes' });
   let busyUntilMs = lead?.losMs ?? nowMs;
   for (const group of coming) {
@@ -33,9 +29,7 @@ export function phoneList(groups: readonly PassGroup[], nowMs: number): PhoneLis
     items.append(h('li', {}, item(group, nowMs)));
     busyUntilMs = Math.max(busyUntilMs, group.losMs);
   }
-  element.append(items);
-  setNow(nowMs);
-  return { element, setNow };
+  return { leading: head?.element, following: items, setNow: (instantMs) => { head?.setNow(instantMs); } };
 }
 
 function betweenWords(group: PassGroup, busyUntilMs: number): string {
@@ -43,7 +37,7 @@ function betweenWords(group: PassGroup, busyUntilMs: number): string {
   return gapS >= 0 ? `${wait(gapS)} free` : `overlaps the pass above by ${duration(Math.min(-gapS, (group.losMs - group.aosMs) / 1000))}`;
 }
 
-function leading(group: PassGroup): PhoneList {
+function leading(group: PassGroup): { readonly element: HTMLElement; readonly setNow: (nowMs: number) => void } {
   const { best } = group;
   const count = h('span', { class: 'countdown' });
   const until = h('span', {});

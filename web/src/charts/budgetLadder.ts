@@ -30,7 +30,7 @@ export function budgetLadder(best: Budget, now: Budget, zone: Zone, stairPx: num
       h('td', { class: 'right' }, value(row, isLast)), cell);
   });
   return h('table', { class: 'ladder' },
-    h('thead', {}, h('tr', {}, head('Line'), head('value, dB', 'right'), head('change from best second', 'right'))),
+    h('thead', {}, h('tr', {}, head('Line'), head('value, dB', 'right'), head('since best second', 'right'))),
     h('tbody', {}, bestRow, body));
 }
 

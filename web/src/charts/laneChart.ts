@@ -49,6 +49,8 @@ const look = { pxPerDb: 2.3 };
 const labelPx = 12;
 const lanePaddingPx = 6;
 const hillUnderPx = 6;
+/** A longer name is cut, or a lane would stack as if its passes overlapped. */
+const widestNamePx = 132;
 
 /** A lane for each antenna over time; each pass is a hill over its required line, and a link to its page. */
 export function laneChart(input: LaneChartInput): LaneChart {
@@ -102,6 +104,7 @@ export function laneChart(input: LaneChartInput): LaneChart {
 
 interface PassBox extends LaneBox {
   readonly rise: number;
+  readonly name: string;
   readonly nameX: number;
   readonly worthX: number;
   readonly worthAnchor: 'start' | 'end';
@@ -115,15 +118,16 @@ function boxOf(entry: LanePass, scale: TimeScale, labelled: boolean): PassBox {
   const isHill = right - left >= narrowestHillPx && pass.marginProfile !== undefined;
   const excessDb = Math.min(highestExcessDb, pass.highestMarginDb - pass.requiredMarginDb);
   const rise = isHill ? Math.max(2, excessDb * look.pxPerDb) : 13;
-  if (!labelled) return { left, right, rise, above: rise, below: hillUnderPx, nameX: left, worthX: right, worthAnchor: 'start' };
+  if (!labelled) return { left, right, rise, above: rise, below: hillUnderPx, name: '', nameX: left, worthX: right, worthAnchor: 'start' };
   const timingErrorMs = pass.elementSet.isStale ? (pass.elementSet.timingErrorS ?? 0) * 1000 : 0;
   const whiskerPx = scale.x(scale.fromMs + timingErrorMs) - scale.left;
-  const nameWidth = textWidth(entry.label, labelPx, 650);
+  const name = fitted(entry.label, widestNamePx, labelPx, 650);
+  const nameWidth = textWidth(name, labelPx, 650);
   const worthWidth = textWidth(worth(pass), labelPx, 400) + 4;
   const nameX = Math.max(scale.left + 2, Math.min(left, scale.right - nameWidth));
   const fitsRight = right + whiskerPx + worthWidth <= scale.right;
   return {
-    rise, nameX,
+    rise, name, nameX,
     worthX: fitsRight ? right + whiskerPx + 4 : left - whiskerPx - 4, worthAnchor: fitsRight ? 'start' : 'end',
     left: Math.min(nameX, fitsRight ? left - whiskerPx : left - whiskerPx - worthWidth),
     right: Math.max(nameX + nameWidth, fitsRight ? right + whiskerPx + worthWidth : right + whiskerPx),
@@ -142,7 +146,7 @@ function passLink(entry: LanePass, box: PassBox, scale: TimeScale, baseline: num
     hillRibbon(pass, scale.x, look));
   if (labelled) {
     link.append(
-      s('text', { class: pass.usableS === 0 ? 'name quiet-name' : 'name', x: box.nameX, y: -box.rise - 5 }, entry.label), ' ',
+      s('text', { class: pass.usableS === 0 ? 'name quiet-name' : 'name', x: box.nameX, y: -box.rise - 5 }, box.name), ' ',
       s('text', { class: 'ink2-text', 'text-anchor': box.worthAnchor, x: box.worthX, y: 11 }, worth(pass)));
   }
   return link;

@@ -10,13 +10,14 @@ import { valueTicks } from './timeScale';
 
 /** Below required the chart keeps this much of the curve; more would only shrink what carries bytes. */
 const shownBelowRequiredDb = 7;
+const leastBelowRequiredDb = 3;
 const leastAboveRequiredDb = 6;
 const leastLabelGapPx = 13;
 
 /** The hill in full: margin in dB against time, with the lines at which each faster waveform begins to close. */
 export function marginChart(data: PassData, frame: ChartFrame): StackedChart {
   const { requiredMarginDb, robustMarginDb, pass } = data;
-  const lowestDb = Math.min(0, requiredMarginDb - shownBelowRequiredDb);
+  const lowestDb = Math.max(requiredMarginDb - shownBelowRequiredDb, Math.min(...robustMarginDb, requiredMarginDb - leastBelowRequiredDb) - 0.5);
   const highestDb = Math.max(...robustMarginDb, requiredMarginDb + leastAboveRequiredDb) + 1.5;
   const y = valueScale(lowestDb, highestDb, frame.top, frame.height);
   const { scale } = frame;

@@ -43,7 +43,7 @@ export function overviewStrip(input: OverviewInput): SVGSVGElement {
     }
     const marks = s('g', { class: 'overview-row', transform: `translate(0 ${y + rowPx - 1})` });
     for (const pass of row.passes) {
-      marks.append(block(pass, scale.x(Date.parse(pass.aosUtc)), scale.x(Date.parse(pass.losUtc)), (rowPx - 2) / 4));
+      marks.append(block(pass, Math.max(scale.left, scale.x(Date.parse(pass.aosUtc))), Math.min(scale.right, scale.x(Date.parse(pass.losUtc))), (rowPx - 2) / 4));
     }
     element.append(marks);
   }

@@ -121,10 +121,22 @@ function path(data: PassData, from: number, to: number): string {
   return text;
 }
 
+/** Which side of the track looks away from the zenith: 1 when that is to the right of its course on the screen, else -1. */
+function outerSide(data: PassData): 1 | -1 {
+  const highest = data.timeline.elevationDeg.indexOf(Math.max(...data.timeline.elevationDeg));
+  const middle = Math.min(data.count - 2, Math.max(1, highest));
+  const here = pointAt(data, middle);
+  const before = pointAt(data, middle - 1);
+  const after = pointAt(data, middle + 1);
+  const outward = -(after.y - before.y) * (here.x - centrePx) + (after.x - before.x) * (here.y - centrePx);
+  return outward >= 0 ? 1 : -1;
+}
+
 /** Ticks each minute outside the track; each second one named, where the names find room. */
 function minuteTicks(data: PassData, zone: Zone): SVGElement[] {
   const elements: SVGElement[] = [];
   const minuteMs = 60_000;
+  const side = outerSide(data);
   const everyMin = data.count * data.stepMs > 30 * minuteMs ? 10 : 2;
   for (let timeMs = Math.ceil(data.startMs / minuteMs) * minuteMs; timeMs < timeOf(data, data.count - 1); timeMs += minuteMs) {
     const index = Math.round((timeMs - data.startMs) / data.stepMs);
@@ -133,7 +145,7 @@ function minuteTicks(data: PassData, zone: Zone): SVGElement[] {
     const before = pointAt(data, index - 1);
     const after = pointAt(data, index + 1);
     const length = Math.hypot(after.x - before.x, after.y - before.y) || 1;
-    const [normalX, normalY] = [-(after.y - before.y) / length, (after.x - before.x) / length];
+    const [normalX, normalY] = [(-side * (after.y - before.y)) / length, (side * (after.x - before.x)) / length];
     const named = (timeMs / minuteMs) % everyMin === 0;
     if (everyMin > 2 && !named) continue;
     elements.push(s('path', { class: 'minute-tick', d: `M${round(here.x + normalX * 6)} ${round(here.y + normalY * 6)}l${round(normalX * 5)} ${round(normalY * 5)}` }));

@@ -5,7 +5,11 @@ export interface Quantity {
 }
 
 const minusSign = '\u2212';
-const thinSpace = '\u2009';
+/**
+ * Between number and unit. The typeface's thin space is 0.11 em, which reads as none at 12 px; its no-break space
+ * is a quarter em, and a number never ends a line without its unit.
+ */
+const unitSpace = '\u00a0';
 
 /** Fixed decimals, a true minus sign, thousands parted by commas; what rounds to nothing carries no sign. */
 export function fixed(value: number, decimals: number): string {
@@ -34,10 +38,10 @@ export function short(value: number): string {
   return String(Number(value.toPrecision(12))).replace('-', minusSign);
 }
 
-/** Number and unit with a thin space between; degrees and per cent of an angle stand close. */
+/** Number and unit with a space between; degrees and per cent of an angle stand close. */
 export function plain(quantity: Quantity): string {
   if (quantity.unit === '') return quantity.number;
-  return quantity.unit.startsWith('°') ? quantity.number + quantity.unit : quantity.number + thinSpace + quantity.unit;
+  return quantity.unit.startsWith('°') ? quantity.number + quantity.unit : quantity.number + unitSpace + quantity.unit;
 }
 
 export function db(value: number, decimals = 1): Quantity {

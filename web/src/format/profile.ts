@@ -6,7 +6,7 @@ import { plain } from './number';
 export function position(station: Station): string {
   const { latitudeDeg, longitudeDeg, heightM } = station.position;
   const east = longitudeDeg > 180 ? longitudeDeg - 360 : longitudeDeg;
-  return `${Math.abs(latitudeDeg).toFixed(4)}° ${latitudeDeg < 0 ? 'S' : 'N'} ${Math.abs(east).toFixed(4)}° ${east < 0 ? 'W' : 'E'}, ${(heightM ?? 0).toFixed(0).replace('-', '\u2212')}\u2009m`;
+  return `${Math.abs(latitudeDeg).toFixed(4)}° ${latitudeDeg < 0 ? 'S' : 'N'} ${Math.abs(east).toFixed(4)}° ${east < 0 ? 'W' : 'E'}, ${(heightM ?? 0).toFixed(0).replace('-', '\u2212')}\u00a0m`;
 }
 
 /** The antennas of a station by name. */
@@ -17,7 +17,7 @@ export function antennas(station: Station): string {
 /** 8200 MHz, up to 37.5 Mbit/s */
 export function radio(entry: Radio): string {
   const rates = (entry.waveforms ?? []).map((waveform) => waveform.bitRateBps);
-  const frequency = `${String(Number((entry.frequencyHz / 1e6).toFixed(3)))}\u2009MHz`;
+  const frequency = `${String(Number((entry.frequencyHz / 1e6).toFixed(3)))}\u00a0MHz`;
   return rates.length === 0 ? frequency : `${frequency}, up to ${plain(bitRate(Math.max(...rates)))}`;
 }
 
@@ -29,5 +29,5 @@ export function radios(spacecraft: Spacecraft): string {
 
 /** Orbital figures of an element set: 15.19 rev/day, 97.5°, e 0.0004 */
 export function orbit(entry: { readonly meanMotionRevPerDay: number; readonly inclinationDeg: number; readonly eccentricity: number }): string {
-  return `${entry.meanMotionRevPerDay.toFixed(4)}\u2009rev/day, inclined ${entry.inclinationDeg.toFixed(2)}°, eccentricity ${entry.eccentricity.toFixed(5)}`;
+  return `${entry.meanMotionRevPerDay.toFixed(4)}\u00a0rev/day, inclined ${entry.inclinationDeg.toFixed(2)}°, eccentricity ${entry.eccentricity.toFixed(5)}`;
 }

@@ -79,18 +79,18 @@ export function countdown(seconds: number): string {
 /** A wait in words: 40 s, 24 min, 1 h 06 min, 2 d 3 h. */
 export function wait(seconds: number): string {
   const whole = Math.max(0, Math.floor(seconds));
-  if (whole < 60) return `${whole}\u2009s`;
+  if (whole < 60) return `${whole}\u00a0s`;
   const minutes = Math.floor(whole / 60);
-  if (minutes < 60) return `${minutes}\u2009min`;
+  if (minutes < 60) return `${minutes}\u00a0min`;
   const hours = Math.floor(minutes / 60);
-  if (hours < 24) return `${hours}\u2009h ${two(minutes % 60)}\u2009min`;
+  if (hours < 24) return `${hours}\u00a0h ${two(minutes % 60)}\u00a0min`;
   const days = Math.floor(hours / 24);
-  return hours % 24 === 0 ? `${days}\u2009d` : `${days}\u2009d ${hours % 24}\u2009h`;
+  return hours % 24 === 0 ? `${days}\u00a0d` : `${days}\u00a0d ${hours % 24}\u00a0h`;
 }
 
 /** The age of an element set: 9.8 h, or 6.2 d from two days on. */
 export function age(hours: number): string {
-  return Math.abs(hours) < 48 ? `${hours.toFixed(1).replace('-', '\u2212')}\u2009h` : `${(hours / 24).toFixed(1).replace('-', '\u2212')}\u2009d`;
+  return Math.abs(hours) < 48 ? `${hours.toFixed(1).replace('-', '\u2212')}\u00a0h` : `${(hours / 24).toFixed(1).replace('-', '\u2212')}\u00a0d`;
 }
 
 /** The name of the zone as the header shows it. */

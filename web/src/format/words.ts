@@ -16,7 +16,7 @@ export function verdict(value: Verdict): string {
 /** How far the best second is from the required margin, in words. */
 export function shortfall(pass: Pass): string {
   const shortByDb = pass.cause.shortByDb ?? pass.requiredMarginDb - pass.highestMarginDb;
-  return shortByDb > 0 ? `${fixed(shortByDb, 1)}\u2009dB short` : 'too short to use';
+  return shortByDb >= 0.05 ? `${fixed(shortByDb, 1)}\u00a0dB short` : 'too short to use';
 }
 
 /** What a pass is good for, in a few words for labels and read-aloud names. */

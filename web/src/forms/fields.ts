@@ -94,7 +94,7 @@ export function isObject(value: Json | undefined): value is JsonObject {
 
 /** What a person typed as a number: blank is left out, and what is no number stays as text for the service to refuse. */
 export function readNumber(typed: string, factor: number): Json | undefined {
-  const clean = typed.trim().replaceAll('\u2212', '-').replace(/[\s\u2009_]/g, '');
+  const clean = typed.trim().replaceAll('\u2212', '-').replace(/[\s\u00a0_]/g, '');
   if (clean === '') return undefined;
   const value = Number(clean);
   return Number.isFinite(value) ? Number((value * factor).toPrecision(15)) : typed.trim();

@@ -77,7 +77,7 @@ function provenance(pass: PassDetail): HTMLElement {
   const { elementSet } = pass;
   const epochMs = Date.parse(elementSet.epochUtc);
   const epoch = sameDay(epochMs, nowMs(), zone()) ? clockTime(epochMs, zone()) : dayAndTime(epochMs, zone());
-  const timing = elementSet.timingErrorS === undefined ? '' : `, ±${fixed(elementSet.timingErrorS, elementSet.timingErrorS < 10 ? 1 : 0)}\u2009s`;
+  const timing = elementSet.timingErrorS === undefined ? '' : `, ±${fixed(elementSet.timingErrorS, elementSet.timingErrorS < 10 ? 1 : 0)}\u00a0s`;
   return h('div', { class: 'provenance small' },
     h('p', { class: elementSet.isStale ? 'caused' : '' }, `Element set ${epoch}, ${age(elementSet.ageH)} old${timing}`),
     h('p', {}, `Station revision ${pass.stationRevision}, spacecraft revision ${pass.spacecraftRevision}`),

@@ -41,7 +41,7 @@ export function filterGroup(...controls: Node[]): HTMLElement {
 }
 
 function periodName(hours: PeriodH): string {
-  return hours === 168 ? '7\u2009d' : `${hours}\u2009h`;
+  return hours === 168 ? '7\u00a0d' : `${hours}\u00a0h`;
 }
 
 function picker(label: string, all: string | undefined, options: readonly { readonly id: string; readonly name: string }[], value: string | undefined, onPick: (value: string | undefined) => void): HTMLElement {
@@ -68,5 +68,5 @@ function switchOf(label: string, name: string, options: readonly { readonly valu
 export function legend(): HTMLElement {
   const swatch = (name: string, text: string) => h('li', {}, h('i', { class: `swatch ${name}` }), text);
   return h('ul', { class: 'legend', 'aria-label': 'Margin above required' },
-    swatch('s1', '0–3'), swatch('s2', '3–6'), swatch('s3', '6–9'), swatch('s4', '9\u2009dB and more above required'), swatch('hatch', 'below required, or not yet acquired'));
+    swatch('s1', '0–3'), swatch('s2', '3–6'), swatch('s3', '6–9'), swatch('s4', '9\u00a0dB and more above required'), swatch('hatch', 'below required, or not yet acquired'));
 }

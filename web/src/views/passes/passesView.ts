@@ -146,11 +146,11 @@ class PassesPage {
     const filters = filterGroup(...passControls(input));
     const stationPicker = filterGroup(stationControl(input));
     if (groups.every((group) => group.losMs <= nowMs())) {
-      return [stationPicker, h('div', { class: 'state' }, h('h1', {}, 'No passes in the next 24\u2009h'), h('p', { class: 'quiet' }, `Over ${station?.name ?? 'this station'}, with these filters.`)), filters, ...this.without(feed)];
+      return [stationPicker, h('div', { class: 'state' }, h('h1', {}, 'No passes in the next 24\u00a0h'), h('p', { class: 'quiet' }, `Over ${station?.name ?? 'this station'}, with these filters.`)), filters, ...this.without(feed)];
     }
     const list = phoneList(groups, nowMs());
     this.ticking.push(list.setNow);
-    return [stationPicker, list.leading ?? h('h1', {}, 'No pass closes in the next 24\u2009h'), filters, list.following, ...this.without(feed)];
+    return [stationPicker, list.leading ?? h('h1', {}, 'No pass closes in the next 24\u00a0h'), filters, list.following, ...this.without(feed)];
   }
 
   private wideContent(feed: PassFeed): Node[] {

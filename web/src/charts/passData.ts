@@ -14,7 +14,11 @@ export interface PassData {
   readonly requiredMarginDb: number;
 }
 
-export function passData(pass: PassDetail, timeline: Timeline): PassData {
+/** More seconds than this are more than a screen has pixels for; a pass of many hours is shown in longer steps. */
+const mostRows = 3600;
+
+export function passData(pass: PassDetail, wholeTimeline: Timeline): PassData {
+  const timeline = thinned(wholeTimeline, Math.ceil(wholeTimeline.elevationDeg.length / mostRows));
   const startMs = Date.parse(timeline.startUtc);
   const stepMs = timeline.stepS * 1000;
   const count = timeline.elevationDeg.length;
@@ -25,6 +29,22 @@ export function passData(pass: PassDetail, timeline: Timeline): PassData {
     robustMarginDb: robust?.marginDb ?? timeline.marginDb,
     requiredMarginDb: robust?.requiredMarginDb ?? pass.requiredMarginDb,
   };
+}
+
+/** Every `stride`th row of all columns. */
+export function thinned(timeline: Timeline, stride: number): Timeline {
+  if (stride <= 1) return timeline;
+  const thin = (column: readonly number[]) => column.filter((_, index) => index % stride === 0);
+  const columns = Object.entries(timeline).map(([name, value]) => [name, isColumn(value) ? thin(value) : value] as const);
+  return {
+    ...(Object.fromEntries(columns) as unknown as Timeline),
+    stepS: timeline.stepS * stride,
+    waveforms: timeline.waveforms.map((waveform) => ({ ...waveform, marginDb: thin(waveform.marginDb) })),
+  };
+}
+
+function isColumn(value: unknown): value is readonly number[] {
+  return Array.isArray(value) && typeof value[0] === 'number';
 }
 
 export function timeOf(data: PassData, index: number): number {

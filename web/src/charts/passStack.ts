@@ -26,6 +26,7 @@ export interface PassStack {
 
 const headPx = 30;
 const flagHalfPx = 32;
+const tickNameHalfPx = 18;
 
 /** All charts of a pass on one time axis under one cursor, moved by pointer, touch or arrow keys. */
 export function passStack(input: StackInput): PassStack {
@@ -43,15 +44,17 @@ export function passStack(input: StackInput): PassStack {
     top += heightPx + afterPx;
   };
   add(isPhone ? 190 : 240, 22, (frame) => marginChart(data, frame));
-  add(isPhone ? 20 : 34, isPhone ? 4 : 30, (frame) => rateStaircase(data, frame));
+  add(isPhone ? 20 : 34, isPhone ? 4 : 42, (frame) => rateStaircase(data, frame));
   if (!isPhone) addLines(data, add);
-  const bottom = top - 8;
-  for (const tickMs of timeTicks(scale, 84, input.zoneOffsetMs)) {
+  const bottom = isPhone ? top - 8 : top - 28;
+  const tickNames = timeTicks(scale, 84, input.zoneOffsetMs).map((tickMs) => {
     const x = Math.round(scale.x(tickMs)) + 0.5;
-    grid.append(s('path', { class: 'grid', d: `M${x} ${headPx - 4}V${bottom}` }), s('text', { class: 'middle', x, y: 15 }, hourMinute(tickMs, input.zone)));
-  }
-  element.setAttribute('height', String(bottom + 8));
-  element.setAttribute('viewBox', `0 0 ${widthPx} ${bottom + 8}`);
+    const name = s('text', { class: 'middle', x, y: 15 }, hourMinute(tickMs, input.zone));
+    grid.append(s('path', { class: 'grid', d: `M${x} ${headPx - 4}V${bottom}` }), name);
+    return { x, name };
+  });
+  element.setAttribute('height', String(top));
+  element.setAttribute('viewBox', `0 0 ${widthPx} ${top}`);
 
   const time = s('text', { class: 'flag-text', x: 0, y: 15 });
   const flag = s('g', {}, s('rect', { class: 'flag', x: -flagHalfPx, y: 0, width: flagHalfPx * 2, height: 21, rx: 3 }), time);
@@ -62,7 +65,9 @@ export function passStack(input: StackInput): PassStack {
     cursorIndex = index;
     const x = scale.x(timeOf(data, index));
     line.setAttribute('transform', `translate(${x} 0)`);
-    flag.setAttribute('transform', `translate(${Math.min(widthPx - flagHalfPx, Math.max(flagHalfPx, x))} 0)`);
+    const flagX = Math.min(widthPx - flagHalfPx, Math.max(flagHalfPx, x));
+    flag.setAttribute('transform', `translate(${flagX} 0)`);
+    for (const tick of tickNames) tick.name.setAttribute('visibility', Math.abs(tick.x - flagX) < flagHalfPx + tickNameHalfPx ? 'hidden' : 'visible');
     time.textContent = clockTime(timeOf(data, index), input.zone);
     for (const chart of charts) chart.setCursor(index);
     element.setAttribute('aria-valuenow', String(index));
@@ -101,7 +106,7 @@ function addLines(data: PassData, add: (heightPx: number, afterPx: number, draw:
     name: 'Pointing error', column: timeline.pointingErrorDeg, axisFactor: 1, lowest: 0,
     show: (index) => ({ quantity: { number: fixed(at(timeline.pointingErrorDeg, index), 2), unit: 'degrees' } }),
   }));
-  add(92, 8, (frame) => lossStack(data, frame));
+  add(92, 28, (frame) => lossStack(data, frame));
 }
 
 function rateWords(rateHzPerS: number): string {

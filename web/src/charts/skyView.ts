@@ -149,13 +149,26 @@ function minuteTicks(data: PassData, zone: Zone): SVGElement[] {
     const named = (timeMs / minuteMs) % everyMin === 0;
     if (everyMin > 2 && !named) continue;
     elements.push(s('path', { class: 'minute-tick', d: `M${round(here.x + normalX * 6)} ${round(here.y + normalY * 6)}l${round(normalX * 5)} ${round(normalY * 5)}` }));
-    const isClear = Math.hypot(here.x - centrePx, here.y - centrePx) > 40;
-    if (named && isClear) {
-      const anchor = normalX > 0.3 ? '' : normalX < -0.3 ? 'end' : 'middle';
-      elements.push(s('text', { class: anchor, x: here.x + normalX * 15, y: here.y + normalY * 15 + 4 }, hourMinute(timeMs, zone)));
-    }
+    const anchor = normalX > 0.3 ? '' : normalX < -0.3 ? 'end' : 'middle';
+    const place = { x: here.x + normalX * 15, y: here.y + normalY * 15 + 4 };
+    if (named && isClearOfNames(data, place)) elements.push(s('text', { class: anchor, ...place }, hourMinute(timeMs, zone)));
   }
   return elements;
+}
+
+/** Whether a minute's name keeps clear of the compass letters, the zenith and the names of AOS and LOS. */
+function isClearOfNames(data: PassData, place: SkyPoint): boolean {
+  const last = data.count - 1;
+  const taken = [
+    ...[0, 90, 180, 270].map((azimuthDeg) => outside(azimuthDeg, 14)), { x: centrePx, y: centrePx },
+    outside(at(data.timeline.azimuthDeg, 0), 8), outside(at(data.timeline.azimuthDeg, last), 8),
+  ];
+  return taken.every((name) => Math.hypot((name.x - place.x) / 1.6, name.y - place.y) > 20);
+}
+
+function outside(azimuthDeg: number, distancePx: number): SkyPoint {
+  const rim = skyPoint(azimuthDeg, 0);
+  return { x: rim.x + distancePx * Math.sin(azimuthDeg * degree), y: rim.y - distancePx * Math.cos(azimuthDeg * degree) };
 }
 
 /** AOS and LOS with their azimuths outside the rim, clear of the letters of the compass. */

@@ -19,6 +19,8 @@ export interface SkyPoint {
 const sizePx = 396;
 const centrePx = sizePx / 2;
 const radiusPx = 150;
+/** Room at the left and right for the names of AOS and LOS. */
+const sideRoomPx = 26;
 const degree = Math.PI / 180;
 
 /** Zenith in the centre, radius linear in zenith angle, north up, east to the right. */
@@ -41,7 +43,7 @@ export function maskElevationDeg(mask: readonly MaskPoint[], azimuthDeg: number)
 
 /** The sky over the station with the mask, the track in tints of margin, the Sun and minute ticks. */
 export function skyView(data: PassData, zone: Zone): SkyView {
-  const element = s('svg', { class: 'sky', viewBox: `0 0 ${sizePx} ${sizePx}`, role: 'img', 'aria-label': spoken(data) });
+  const element = s('svg', { class: 'sky', viewBox: `${-sideRoomPx} 0 ${sizePx + 2 * sideRoomPx} ${sizePx}`, role: 'img', 'aria-label': spoken(data) });
   element.append(s('circle', { class: 'sky-disc', cx: centrePx, cy: centrePx, r: radiusPx }), maskRing(data.pass.horizonMask), ...skyGrid());
   element.append(...track(data), ...minuteTicks(data, zone), ...endNames(data), ...sunDot(data));
   const cursor = s('circle', { class: 'cursor-dot sky-cursor', r: 5.5 });

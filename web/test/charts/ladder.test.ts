@@ -8,7 +8,9 @@ import { scenario, startMs } from '../mock/scenario';
 
 const tenthOfANanodecibel = 1e-10;
 const { stations, spacecraft } = scenario('mock');
-const served = servedPasses(stations, spacecraft, startMs, startMs + 6 * 3_600_000)[0];
+/** A pass near the zenith, where the mount lags, so that every share of the losses moves. */
+const served = servedPasses(stations, spacecraft, startMs, startMs + 6 * 3_600_000)
+  .find((candidate) => Math.max(...timeline(candidate).pointingErrorDeg) > 0.2);
 if (served === undefined) throw new Error('The invented scenario has no pass.');
 const data = passData(passDetail(served, [], startMs), timeline(served));
 const best = budget(served, timeOf(data, data.bestIndex));
@@ -25,6 +27,13 @@ describe('the ladder', () => {
     const marked = rows.filter((row) => row.isLargestLoss);
     expect(marked.map((row) => row.line.id)).toEqual(['freeSpaceLoss']);
     expect(marked[0]?.changeDb).toBe(Math.min(...rows.map((row) => row.changeDb)));
+  });
+
+  it('marks the first of two equal losses only', () => {
+    const line = (id: string, valueDb: number) => ({ id, name: id, valueDb, unit: 'dB', kind: 'term' as const, source: '' });
+    const rows = ladderRows({ ...best, marginDb: 0, lines: [line('a', 0), line('b', 0)] }, { ...best, lines: [line('a', -2), line('b', -2)] });
+    expect(rows.map((row) => row.isLargestLoss)).toEqual([true, false]);
+    expect(rows.map((row) => row.levelDb)).toEqual([-2, -4]);
   });
 
   it('marks nothing at the best second itself', () => {
@@ -52,6 +61,14 @@ describe('the budget derived from the timeline', () => {
 });
 
 describe('the stacked losses', () => {
+  it('leave noise and polarisation to the rest, and nothing else', () => {
+    const { timeline: columns, bestIndex } = data;
+    const index = data.timeline.pointingErrorDeg.indexOf(Math.max(...data.timeline.pointingErrorDeg));
+    const noiseDb = 10 * Math.log10(at(columns.systemNoiseTemperatureK, index) / at(columns.systemNoiseTemperatureK, bestIndex));
+    const polarisationDb = at(columns.polarisationLossDb, index) - at(columns.polarisationLossDb, bestIndex);
+    expect(Math.abs(lossSharesDb(data, index).rest - noiseDb - polarisationDb)).toBeLessThan(tenthOfANanodecibel);
+  });
+
   it('add up to what the margin has lost since the best second, at every second', () => {
     for (let index = 0; index < data.count; index++) {
       const shares = lossSharesDb(data, index);

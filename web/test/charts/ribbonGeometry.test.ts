@@ -36,6 +36,12 @@ describe('runs', () => {
     expect(seconds(runs)).toEqual([[0, 3], [3, 6], [6, 9], [9, 11], [11, 14], [14, 17], [17, 20]]);
   });
 
+  it('reach all four tints on the way up to 10 dB', () => {
+    const runs = runsOf([point(0, 0), point(10, 10)], [{ startUtc: instant(0), endUtc: instant(10) }]);
+    expect(runs.map((run) => run.tint)).toEqual([1, 2, 3, 4]);
+    expect(seconds(runs)).toEqual([[0, 3], [3, 6], [6, 9], [9, 10]]);
+  });
+
   it('hatch the seconds of acquisition although the link closes', () => {
     const runs = runsOf(hill, [{ startUtc: instant(5), endUtc: instant(17) }]);
     expect(runs[0]?.tint).toBeUndefined();

@@ -23,6 +23,7 @@ describe('the mask', () => {
     expect(maskElevationDeg(mask, 220)).toBeCloseTo(7, 9);
     expect(maskElevationDeg(mask, 40)).toBeCloseTo(7, 9);
     expect(maskElevationDeg(mask, 350)).toBe(4);
+    expect(maskElevationDeg(mask, 355)).toBeCloseTo(4.3, 9);
   });
 
   it('is a constant with one point', () => {

@@ -20,6 +20,17 @@ describe('groups', () => {
     }
   });
 
+  it('hold one pass each: links within a group overlap, groups of one pairing do not', () => {
+    const lastEnd = new Map<string, number>();
+    for (const group of groupPasses(passes)) {
+      const pairing = `${group.best.spacecraft} ${group.best.station}`;
+      expect(group.aosMs).toBeGreaterThanOrEqual(lastEnd.get(pairing) ?? -Infinity);
+      lastEnd.set(pairing, group.losMs);
+      expect(group.passes.every((pass) => Date.parse(pass.aosUtc) < group.losMs && Date.parse(pass.losUtc) > group.aosMs)).toBe(true);
+      expect(group.losMs - group.aosMs).toBeLessThan(hourMs);
+    }
+  });
+
   it('are ordered by AOS', () => {
     const starts = groupPasses([...passes].reverse()).map((group) => group.aosMs);
     expect(starts).toEqual([...starts].sort((first, second) => first - second));

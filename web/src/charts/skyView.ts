@@ -21,6 +21,7 @@ const centrePx = sizePx / 2;
 const radiusPx = 150;
 /** Room at the left and right for the names of AOS and LOS. */
 const sideRoomPx = 26;
+const minuteNameHalfPx = 16;
 const degree = Math.PI / 180;
 
 /** Zenith in the centre, radius linear in zenith angle, north up, east to the right. */
@@ -153,7 +154,8 @@ function minuteTicks(data: PassData, zone: Zone): SVGElement[] {
     elements.push(s('path', { class: 'minute-tick', d: `M${round(here.x + normalX * 6)} ${round(here.y + normalY * 6)}l${round(normalX * 5)} ${round(normalY * 5)}` }));
     const anchor = normalX > 0.3 ? '' : normalX < -0.3 ? 'end' : 'middle';
     const place = { x: here.x + normalX * 15, y: here.y + normalY * 15 + 4 };
-    if (named && isClearOfNames(data, place)) elements.push(s('text', { class: anchor, ...place }, hourMinute(timeMs, zone)));
+    const middle = { x: place.x + (anchor === 'end' ? -minuteNameHalfPx : anchor === '' ? minuteNameHalfPx : 0), y: place.y };
+    if (named && isClearOfNames(data, middle)) elements.push(s('text', { class: anchor, ...place }, hourMinute(timeMs, zone)));
   }
   return elements;
 }

@@ -16,7 +16,6 @@ using PassPlanner.Service.Web;
 using PassPlanner.Store;
 
 var builder = WebApplication.CreateBuilder(args);
-builder.WebHost.UseStaticWebAssets();
 builder.Services.ConfigureHttpJsonOptions(options => WireFormat.Apply(options.SerializerOptions));
 builder.Services.AddProblemDetails();
 builder.Services.AddExceptionHandler<ProblemExceptionHandler>();

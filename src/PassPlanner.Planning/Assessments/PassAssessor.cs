@@ -85,8 +85,10 @@ public sealed class PassAssessor
         }
 
         CloseWindow();
+        // A pass that stays below the minimum elevation closes when every one of its seconds does.
+        int missedS = aboveMinimumS > 0 ? aboveMinimumMissedS : seconds - closedS;
         Verdict verdict = usableS == 0 ? Verdict.DoesNotClose
-            : aboveMinimumS > 0 && aboveMinimumMissedS == 0 ? Verdict.Closes
+            : missedS == 0 ? Verdict.Closes
             : Verdict.ClosesInPart;
         return new Assessment
         {

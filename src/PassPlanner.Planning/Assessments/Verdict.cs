@@ -9,6 +9,6 @@ public enum Verdict
     /// <summary>Some second is usable, but not every second above the link's minimum elevation.</summary>
     ClosesInPart,
 
-    /// <summary>Every second above the link's minimum elevation is usable, acquisition aside.</summary>
+    /// <summary>Every second above the link's minimum elevation is usable, acquisition aside; for a pass that stays below it, every second.</summary>
     Closes,
 }

@@ -1,3 +1,5 @@
+using System.Text.Json.Serialization;
+
 namespace PassPlanner.Service.Passes;
 
 /// <summary>Passes of a period.</summary>
@@ -15,7 +17,8 @@ public sealed record PassListResponse
     /// <summary>Passes by AOS.</summary>
     public required IReadOnlyList<PassResponse> Items { get; init; }
 
-    /// <summary>Cursor of the next page; left out on the last.</summary>
+    /// <summary>Cursor of the next page; null on the last.</summary>
+    [JsonIgnore(Condition = JsonIgnoreCondition.Never)]
     public string? Next { get; init; }
 
     /// <summary>Numbers over all pages.</summary>

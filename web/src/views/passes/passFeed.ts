@@ -47,13 +47,13 @@ export async function loadFeed(spanH: number, signal: AbortSignal, onPart: (feed
     fromMs, toMs, passes: first.value.items, withoutPasses: first.value.withoutPasses,
     stations: stations.value, spacecraft: spacecraft.value, status: status.value,
   };
-  let cursor = first.value.next;
+  let cursor = first.value.next ?? null;
   while (cursor !== null) {
     onPart(feed);
     const page = await planner.passes({ ...query, cursor }, signal);
     if (!page.ok) return page;
     feed = { ...feed, passes: [...feed.passes, ...page.value.items] };
-    cursor = page.value.next;
+    cursor = page.value.next ?? null;
   }
   return { ok: true, feed };
 }

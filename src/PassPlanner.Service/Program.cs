@@ -51,5 +51,8 @@ api.MapWaveforms();
 api.MapRadioQuestions();
 api.MapDemo();
 api.MapStatus();
-app.MapDashboardFallback();
+app.MapDashboardPages();
 app.Run();
+
+/// <summary>The host, named so that tests can start it.</summary>
+public partial class Program;

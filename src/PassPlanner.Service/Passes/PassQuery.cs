@@ -75,7 +75,13 @@ public sealed record PassQuery
                 ProfileStepS = reader.Whole("profileStepS", 1, 60, "s") ?? 0,
             },
             MinimumMarginDb = reader.Number("minimumMarginDb", -200, 200, "dB"),
-            Verdict = verdict is null ? null : Enum.Parse<Verdict>(verdict, ignoreCase: true),
+            Verdict = verdict switch
+            {
+                "closes" => Planning.Assessments.Verdict.Closes,
+                "closesInPart" => Planning.Assessments.Verdict.ClosesInPart,
+                "doesNotClose" => Planning.Assessments.Verdict.DoesNotClose,
+                _ => null,
+            },
             ClosingOnly = reader.Flag("closes"),
             Offset = reader.Whole("cursor", 0, 1_000_000, "passes") ?? 0,
             Limit = reader.Whole("limit", 1, GreatestLimit, "passes") ?? DefaultLimit,

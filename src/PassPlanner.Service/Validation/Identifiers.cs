@@ -11,17 +11,17 @@ public static class Identifiers
     public static bool IsValid(string text) =>
         text.Length is >= 1 and <= MaximumLength && text.All(c => c is >= 'a' and <= 'z' or >= '0' and <= '9' or '-');
 
-    /// <summary>An identifier made from a name: lower case, other characters folded into single hyphens.</summary>
+    /// <summary>An identifier made from a name: lower case, and a hyphen for each run of other characters.</summary>
     public static string FromName(string name)
     {
         var identifier = new StringBuilder();
-        foreach (char c in name.Normalize(NormalizationForm.FormD).ToLowerInvariant())
+        foreach (char c in name.ToLowerInvariant())
         {
             if (c is >= 'a' and <= 'z' or >= '0' and <= '9')
             {
                 identifier.Append(c);
             }
-            else if (identifier.Length > 0 && identifier[^1] != '-' && !IsCombining(c))
+            else if (identifier.Length > 0 && identifier[^1] != '-')
             {
                 identifier.Append('-');
             }
@@ -35,7 +35,4 @@ public static class Identifiers
         string trimmed = identifier.ToString().Trim('-');
         return trimmed.Length == 0 ? "unnamed" : trimmed;
     }
-
-    private static bool IsCombining(char c) =>
-        char.GetUnicodeCategory(c) == System.Globalization.UnicodeCategory.NonSpacingMark;
 }

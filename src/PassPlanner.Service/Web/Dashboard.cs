@@ -6,8 +6,6 @@ namespace PassPlanner.Service.Web;
 /// <summary>Serves the built front end, and its first page for every address that the front end routes itself.</summary>
 public static class Dashboard
 {
-    private static readonly string[] NotPages = ["/api", "/openapi", "/health"];
-
     /// <summary>Serves the files: those with a hash in their name for good, the others checked at each visit.</summary>
     public static void UseDashboard(this WebApplication app)
     {
@@ -21,20 +19,18 @@ public static class Dashboard
         });
     }
 
-    /// <summary>Answers pages with the first page, and anything else that does not exist with a problem.</summary>
-    public static void MapDashboardFallback(this WebApplication app) => app.MapFallback((HttpContext context) =>
-    {
-        PathString path = context.Request.Path;
-        IFileInfo index = app.Environment.WebRootFileProvider.GetFileInfo("index.html");
-        bool isPage = HttpMethods.IsGet(context.Request.Method)
-            && !Path.HasExtension(path)
-            && !NotPages.Any(prefix => path.StartsWithSegments(prefix, StringComparison.Ordinal));
-        if (!isPage || !index.Exists)
+    /// <summary>Answers every page that the front end routes itself with the first page.</summary>
+    public static void MapDashboardPages(this WebApplication app) => app.MapGet(
+        "{*path:nonfile:regex(^(?!api|openapi|health).*$)}",
+        (HttpContext context) =>
         {
-            throw RequestProblemException.NotFound($"There is nothing at {path}");
-        }
+            IFileInfo index = app.Environment.WebRootFileProvider.GetFileInfo("index.html");
+            if (!index.Exists)
+            {
+                throw RequestProblemException.NotFound("The front end has not been built");
+            }
 
-        context.Response.Headers.CacheControl = "no-cache";
-        return TypedResults.Stream(index.CreateReadStream(), "text/html; charset=utf-8");
-    }).ExcludeFromDescription();
+            context.Response.Headers.CacheControl = "no-cache";
+            return TypedResults.Stream(index.CreateReadStream(), "text/html; charset=utf-8");
+        }).ExcludeFromDescription();
 }

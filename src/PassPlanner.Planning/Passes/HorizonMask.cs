@@ -83,7 +83,7 @@ public sealed class HorizonMask
     /// <summary>Least and greatest elevation of the horizon between two azimuths, going clockwise.</summary>
     /// <param name="fromAzimuthDeg">First azimuth, degrees, 0 to below 360.</param>
     /// <param name="spanDeg">How far clockwise, degrees, 0 to 360.</param>
-    internal (double LeastDeg, double GreatestDeg) BoundsDeg(double fromAzimuthDeg, double spanDeg)
+    public (double LeastDeg, double GreatestDeg) BoundsDeg(double fromAzimuthDeg, double spanDeg)
     {
         double end = fromAzimuthDeg + spanDeg;
         double first = ElevationDegAt(fromAzimuthDeg);

@@ -13,6 +13,8 @@ internal sealed class CrossingFinder(StationView view)
 {
     private const double ShortestS = 0.125;
 
+    private const double EdgeToleranceS = 1e-6;
+
     /// <summary>How far SGP4's velocity may be from the derivative of its position, km/s.</summary>
     private const double VelocitySlackKmPerS = 0.01;
 
@@ -65,9 +67,56 @@ internal sealed class CrossingFinder(StationView view)
         }
         else if (isUpAtStart != isUpAtEnd)
         {
-            double rootS = new ViewFunction(view, ViewQuantity.Clearance, start.Utc).Root(0.0, durationS);
+            double rootS = isSingle
+                ? LevelCrossing(start.Utc, startSight, endSight, durationS)
+                : new ViewFunction(view, ViewQuantity.Clearance, start.Utc).Root(0.0, durationS, EdgeToleranceS);
             crossings.Add(new Crossing(start.Utc.AddSeconds(rootS), isUpAtEnd));
         }
+    }
+
+    /// <summary>
+    /// The one crossing of a level mask between two nodes: Newton's method with SGP4's velocity as slope, from where
+    /// the cubic through both ends crosses; bracketed solving should it not settle.
+    /// </summary>
+    private double LevelCrossing(UtcInstant startUtc, in Sight startSight, in Sight endSight, double durationS)
+    {
+        const int Turns = 6;
+        double timeS = CubicRoot(
+            view.Clearance(startSight), view.Clearance(endSight), durationS * startSight.SinElevationRate, durationS * endSight.SinElevationRate) * durationS;
+        for (int turn = 0; turn < Turns && view.TryNode(startUtc.AddSeconds(timeS), out EphemerisNode node); turn++)
+        {
+            Sight sight = view.SightOf(node);
+            double stepS = -view.Clearance(sight) / sight.SinElevationRate;
+            timeS += stepS;
+            if (!(timeS >= 0.0 && timeS <= durationS))
+            {
+                break;
+            }
+
+            if (Math.Abs(stepS) < EdgeToleranceS)
+            {
+                return timeS;
+            }
+        }
+
+        return new ViewFunction(view, ViewQuantity.Clearance, startUtc).Root(0.0, durationS, EdgeToleranceS);
+    }
+
+    /// <summary>Where the cubic with given values (of opposite sign) and slopes at 0 and 1 crosses zero, by halving, to 1/1000.</summary>
+    private static double CubicRoot(double start, double end, double startSlope, double endSlope)
+    {
+        double c2 = (3.0 * (end - start)) - (2.0 * startSlope) - endSlope;
+        double c3 = (2.0 * (start - end)) + startSlope + endSlope;
+        double low = 0.0;
+        double high = 1.0;
+        for (int k = 0; k < 10; k++)
+        {
+            double middle = (low + high) / 2.0;
+            bool isStartSide = start + (middle * (startSlope + (middle * (c2 + (middle * c3))))) >= 0.0 == start >= 0.0;
+            (low, high) = isStartSide ? (middle, high) : (low, middle);
+        }
+
+        return (low + high) / 2.0;
     }
 
     private static UtcInstant HalfWay(in EphemerisNode start, in EphemerisNode end) => new((start.Utc.Ticks + end.Utc.Ticks) / 2);

@@ -68,7 +68,7 @@ internal sealed class EphemerisLattice(SpacecraftTrajectory trajectory)
 
         UtcInstant endUtc = StartOf(block + 1);
         Sgp4Status endStatus = At(endUtc, out EphemerisNode end);
-        return AddInterval(start, end, endUtc, endStatus, nodes);
+        return AddInterval(start, LongestStepTicks(start.State), end, LongestStepTicks(end.State), endUtc, endStatus, nodes);
     }
 
     /// <summary>The state at an instant.</summary>
@@ -79,19 +79,25 @@ internal sealed class EphemerisLattice(SpacecraftTrajectory trajectory)
         return status;
     }
 
-    private bool AddInterval(in EphemerisNode start, in EphemerisNode end, UtcInstant endUtc, Sgp4Status endStatus, List<EphemerisNode> nodes)
+    /// <summary>Halves an interval until it is no longer than the steps that the motion at its ends asks for.</summary>
+    private bool AddInterval(
+        in EphemerisNode start,
+        double startStepTicks,
+        in EphemerisNode end,
+        double endStepTicks,
+        UtcInstant endUtc,
+        Sgp4Status endStatus,
+        List<EphemerisNode> nodes)
     {
         long ticks = endUtc.Ticks - start.Utc.Ticks;
         bool fails = endStatus != Sgp4Status.Ok;
-        bool isShort = fails
-            ? ticks <= ShortestTicks
-            : ticks <= ShortestTicks || ticks <= Math.Min(LongestStepTicks(start.State), LongestStepTicks(end.State));
-        if (!isShort)
+        if (ticks > ShortestTicks && (fails || ticks > startStepTicks || ticks > endStepTicks))
         {
             var middleUtc = new UtcInstant(start.Utc.Ticks + (ticks / 2));
             Sgp4Status middleStatus = At(middleUtc, out EphemerisNode middle);
-            return AddInterval(start, middle, middleUtc, middleStatus, nodes)
-                && AddInterval(middle, end, endUtc, endStatus, nodes);
+            double middleStepTicks = LongestStepTicks(middle.State);
+            return AddInterval(start, startStepTicks, middle, middleStepTicks, middleUtc, middleStatus, nodes)
+                && AddInterval(middle, middleStepTicks, end, endStepTicks, endUtc, endStatus, nodes);
         }
 
         if (fails)

@@ -96,13 +96,20 @@ internal sealed class PassDescriber(StationView view)
     }
 
     /// <summary>
-    /// Whether the meridian is crossed on its northern side. Within a ten-thousandth of a degree of the zenith the
+    /// Whether the meridian is crossed on its northern side: told by the nodes alone where they lie further to one side
+    /// than the path between them can bend. Within a ten-thousandth of a degree of the zenith the
     /// side is a matter of rounding, and the azimuth is taken to turn the shorter way.
     /// </summary>
     private bool GoesThroughNorth(in Sight before, in Sight after, UtcInstant startUtc, double durationS)
     {
         const double ZenithRad = 1e-4 * Math.PI / 180.0;
-        double rootS = new ViewFunction(view, ViewQuantity.East, startUtc).Root(0.0, durationS);
+        const double GreatestSagKm = 50.0;
+        if (Math.Min(Math.Abs(before.NorthKm), Math.Abs(after.NorthKm)) > GreatestSagKm && before.NorthKm > 0.0 == after.NorthKm > 0.0)
+        {
+            return before.NorthKm > 0.0;
+        }
+
+        double rootS = new ViewFunction(view, ViewQuantity.East, startUtc).Root(0.0, durationS, 1e-6);
         if (!view.TryNode(startUtc.AddSeconds(rootS), out EphemerisNode node))
         {
             return false;
@@ -121,8 +128,8 @@ internal sealed class PassDescriber(StationView view)
     /// </summary>
     private UtcInstant Extreme(ViewQuantity rate, UtcInstant startUtc, double durationS)
     {
-        double rootS = new ViewFunction(view, rate, startUtc).Root(0.0, durationS);
         double baseS = durationS * PolishPart;
+        double rootS = new ViewFunction(view, rate, startUtc).Root(0.0, durationS, baseS / 100.0);
         for (int turn = 0; turn < PolishTurns; turn++)
         {
             double shiftS = Vertex(rate, startUtc.AddSeconds(rootS), baseS, durationS / 4.0);

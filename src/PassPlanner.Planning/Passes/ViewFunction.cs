@@ -39,13 +39,12 @@ internal readonly struct ViewFunction(StationView view, ViewQuantity quantity, U
     }
 
     /// <summary>
-    /// A root between two times of opposite sign, to a microsecond, by the method of Chandrupatla (Advances in
+    /// A root between two times of opposite sign, by the method of Chandrupatla (Advances in
     /// Engineering Software 28, 1997): inverse quadratic where it is safe, else halving. Works across a jump too,
     /// such as where another element set takes over.
     /// </summary>
-    public double Root(double startS, double endS)
+    public double Root(double startS, double endS, double toleranceS)
     {
-        const double ToleranceS = 1e-6;
         const int Iterations = 100;
         (double a, double b) = (endS, startS);
         (double fa, double fb) = (At(a), At(b));
@@ -66,7 +65,7 @@ internal readonly struct ViewFunction(StationView view, ViewQuantity quantity, U
 
             (a, fa) = (x, fx);
             double best = Math.Abs(fa) < Math.Abs(fb) ? a : b;
-            double tolerance = ToleranceS / (2.0 * Math.Abs(b - a));
+            double tolerance = toleranceS / (2.0 * Math.Abs(b - a));
             if (tolerance > 0.5 || fa == 0.0)
             {
                 return best;

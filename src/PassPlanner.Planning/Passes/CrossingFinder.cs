@@ -23,16 +23,32 @@ internal sealed class CrossingFinder(StationView view)
     private readonly double leastSin = Math.Sin(view.Mask.MinimumDeg * RadPerDeg);
     private readonly double greatestSin = Math.Sin(view.Mask.MaximumDeg * RadPerDeg);
 
-    /// <summary>Whether a spacecraft at two neighbouring nodes is so far below the level that nothing can happen between.</summary>
-    public bool IsFarBelow(double startUpKm, double endUpKm, in SegmentBounds bounds, in EphemerisNode start)
+    /// <summary>Adds all crossings on a grid, in order of time.</summary>
+    public void FindAll(EphemerisGrid grid, List<Crossing> crossings)
     {
-        double reachKm = bounds.PathKm;
-        if (leastSin < 0.0)
-        {
-            reachKm -= 2.0 * leastSin * (start.State.PositionKm.Norm + view.StationRadiusKm + bounds.PathKm);
-        }
+        ReadOnlySpan<double> x = grid.XKm;
+        ReadOnlySpan<double> y = grid.YKm;
+        ReadOnlySpan<double> z = grid.ZKm;
+        ReadOnlySpan<SegmentBounds> segments = grid.Segments;
+        (double upX, double upY, double upZ) = (view.Up.X, view.Up.Y, view.Up.Z);
+        double levelKm = view.Position.Dot(view.Up);
 
-        return startUpKm + endUpKm + reachKm < 0.0;
+        // A mask below the level is reached from below the level, the further down the greater the range.
+        double depth = Math.Max(0.0, -2.0 * leastSin);
+        double startUpKm = (x[0] * upX) + (y[0] * upY) + (z[0] * upZ) - levelKm;
+        for (int i = 0; i < segments.Length; i++)
+        {
+            double endUpKm = (x[i + 1] * upX) + (y[i + 1] * upY) + (z[i + 1] * upZ) - levelKm;
+
+            // On a path no longer than PathKm, the height is at most the mean of both ends plus half of that length.
+            double reachKm = segments[i].PathKm + (depth * (segments[i].RadiusKm + view.StationRadiusKm));
+            if (startUpKm + endUpKm + reachKm >= 0.0)
+            {
+                Find(grid.Nodes[i], grid.Nodes[i + 1], segments[i], crossings);
+            }
+
+            startUpKm = endUpKm;
+        }
     }
 
     /// <summary>Adds the crossings between two nodes, in order of time.</summary>

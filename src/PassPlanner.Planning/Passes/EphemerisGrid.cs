@@ -20,6 +20,9 @@ public sealed class EphemerisGrid
         FirstBlock = firstBlock;
         LastBlock = lastBlock;
         Failure = failure;
+        XKm = Array.ConvertAll(nodes, node => node.State.PositionKm.X);
+        YKm = Array.ConvertAll(nodes, node => node.State.PositionKm.Y);
+        ZKm = Array.ConvertAll(nodes, node => node.State.PositionKm.Z);
         Segments = new SegmentBounds[Math.Max(0, nodes.Length - 1)];
         for (int i = 0; i < Segments.Length; i++)
         {
@@ -40,6 +43,13 @@ public sealed class EphemerisGrid
     public PropagationFailure? Failure { get; }
 
     internal EphemerisNode[] Nodes { get; }
+
+    /// <summary>The positions of the nodes once more, as columns, for the test that every station makes of every node.</summary>
+    internal double[] XKm { get; }
+
+    internal double[] YKm { get; }
+
+    internal double[] ZKm { get; }
 
     internal SegmentBounds[] Segments { get; }
 

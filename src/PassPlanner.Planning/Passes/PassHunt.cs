@@ -41,7 +41,9 @@ internal sealed class PassHunt
             return new PassSearch(VisibilityStatus.NeverUp, [], failure);
         }
 
-        List<Stretch> stretches = [.. Stretches(CrossingsOnGrid()).Where(stretch => stretch.Window.Overlaps(grid.Period))];
+        var crossings = new List<Crossing>();
+        finder.FindAll(grid, crossings);
+        List<Stretch> stretches = [.. Stretches(crossings).Where(stretch => stretch.Window.Overlaps(grid.Period))];
         if (stretches.Count == 0)
         {
             return new PassSearch(VisibilityStatus.NeverUp, [], failure);
@@ -68,26 +70,6 @@ internal sealed class PassHunt
         }
 
         return failure.FirstUtc < grid.Period.StartUtc ? failure with { FirstUtc = grid.Period.StartUtc } : failure;
-    }
-
-    private List<Crossing> CrossingsOnGrid()
-    {
-        var crossings = new List<Crossing>();
-        EphemerisNode[] nodes = grid.Nodes;
-        SegmentBounds[] segments = grid.Segments;
-        double startUpKm = view.UpKm(nodes[0]);
-        for (int i = 0; i < segments.Length; i++)
-        {
-            double endUpKm = view.UpKm(nodes[i + 1]);
-            if (!finder.IsFarBelow(startUpKm, endUpKm, segments[i], nodes[i]))
-            {
-                finder.Find(nodes[i], nodes[i + 1], segments[i], crossings);
-            }
-
-            startUpKm = endUpKm;
-        }
-
-        return crossings;
     }
 
     /// <summary>Pairs rises with falls; ends that the grid does not show are looked for outside it.</summary>

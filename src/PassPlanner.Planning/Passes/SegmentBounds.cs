@@ -7,7 +7,8 @@ namespace PassPlanner.Planning.Passes;
 /// <param name="AccelerationKmPerS2">No Earth-fixed acceleration is greater, km/s^2.</param>
 /// <param name="SpeedKmPerS">No Earth-fixed speed is greater, km/s.</param>
 /// <param name="PathKm">No path from one node to the other is longer, km.</param>
-internal readonly record struct SegmentBounds(double AccelerationKmPerS2, double SpeedKmPerS, double PathKm)
+/// <param name="RadiusKm">No distance from the Earth's centre is greater, km.</param>
+internal readonly record struct SegmentBounds(double AccelerationKmPerS2, double SpeedKmPerS, double PathKm, double RadiusKm)
 {
     /// <summary>The least radius between two nodes is at least this part of the lesser one at the nodes.</summary>
     private const double RadiusFactor = 0.985;
@@ -29,6 +30,6 @@ internal readonly record struct SegmentBounds(double AccelerationKmPerS2, double
         double acceleration = AccelerationFactor * GravityModel.Wgs72.MuKm3PerS2 / (leastKm * leastKm);
         acceleration += (2.0 * Rate * (speed + (acceleration * durationS / 2.0))) + (Rate * Rate * greatestKm);
         double greatestSpeed = speed + (acceleration * durationS / 2.0);
-        return new SegmentBounds(acceleration, greatestSpeed, greatestSpeed * durationS);
+        return new SegmentBounds(acceleration, greatestSpeed, greatestSpeed * durationS, greatestKm);
     }
 }

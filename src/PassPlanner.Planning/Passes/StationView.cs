@@ -7,32 +7,33 @@ namespace PassPlanner.Planning.Passes;
 /// <summary>One spacecraft as one station sees it, by SGP4 itself at any instant. For one search on one thread.</summary>
 internal sealed class StationView(SpacecraftTrajectory trajectory, TopocentricFrame station, HorizonMask mask)
 {
-    private readonly Vector3D position = station.PositionKm;
     private readonly Vector3D east = station.East;
     private readonly Vector3D north = station.North;
-    private readonly Vector3D up = station.Up;
     private readonly double constantSin = Math.Sin(mask.MinimumDeg * (Math.PI / 180.0));
     private Sgp4Sweep sweep;
 
     public HorizonMask Mask { get; } = mask;
 
+    /// <summary>The station, Earth-fixed, km.</summary>
+    public Vector3D Position { get; } = station.PositionKm;
+
+    /// <summary>The ellipsoid's normal there.</summary>
+    public Vector3D Up { get; } = station.Up;
+
     /// <summary>Distance of the station from the Earth's centre, km.</summary>
     public double StationRadiusKm { get; } = station.PositionKm.Norm;
-
-    /// <summary>Height of a spacecraft above the station's level, km: the cheapest test of all.</summary>
-    public double UpKm(in EphemerisNode node) => (node.State.PositionKm - position).Dot(up);
 
     /// <summary>The line of sight at a node.</summary>
     public Sight SightOf(in EphemerisNode node)
     {
-        Vector3D sight = node.State.PositionKm - position;
+        Vector3D sight = node.State.PositionKm - Position;
         double rangeKm = sight.Norm;
         return new Sight(
             sight.Dot(east),
             sight.Dot(north),
-            sight.Dot(up),
+            sight.Dot(Up),
             rangeKm,
-            node.State.VelocityKmPerS.Dot(up),
+            node.State.VelocityKmPerS.Dot(Up),
             sight.Dot(node.State.VelocityKmPerS) / rangeKm);
     }
 

@@ -20,7 +20,7 @@ public sealed class HorizonMask
         ArgumentNullException.ThrowIfNull(points);
         if (points.Count == 0)
         {
-            throw new ArgumentException("horizonMask is empty; it must have at least one point.", nameof(points));
+            throw new ArgumentException("horizonMask is empty; it must have at least one point.");
         }
 
         foreach (MaskPoint point in points)
@@ -34,7 +34,7 @@ public sealed class HorizonMask
             if (Points[i].AzimuthDeg == Points[i - 1].AzimuthDeg)
             {
                 throw new ArgumentException(FormattableString.Invariant(
-                    $"azimuthDeg is {Points[i].AzimuthDeg} degrees twice; each azimuth of a mask must occur once."), nameof(points));
+                    $"azimuthDeg is {Points[i].AzimuthDeg} degrees twice; each azimuth of a mask must occur once."));
             }
         }
 
@@ -129,13 +129,13 @@ public sealed class HorizonMask
         if (point.AzimuthDeg is not (>= 0.0 and < 360.0))
         {
             throw new ArgumentException(FormattableString.Invariant(
-                $"azimuthDeg is {point.AzimuthDeg}; it must be degrees, at least 0 and below 360."), nameof(point));
+                $"azimuthDeg is {point.AzimuthDeg}; it must be degrees, at least 0 and below 360."));
         }
 
         if (point.ElevationDeg is not (>= -5.0 and <= 90.0))
         {
             throw new ArgumentException(FormattableString.Invariant(
-                $"elevationDeg is {point.ElevationDeg}; it must be degrees, -5 to 90."), nameof(point));
+                $"elevationDeg is {point.ElevationDeg}; it must be degrees, -5 to 90."));
         }
     }
 }

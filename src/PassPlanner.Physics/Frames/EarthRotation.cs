@@ -15,7 +15,7 @@ public static class EarthRotation
     /// <summary>Greenwich mean sidereal time, IAU 1982 (Aoki et al., A&amp;A 105, 359, 1982, equation 14).</summary>
     /// <param name="ut1">Instant on the UT1 scale; the day part must end in .5.</param>
     /// <returns>Angle, rad, 0 to below 2 pi.</returns>
-    public static double GreenwichMeanSiderealTimeRad(JulianDateUt1 ut1)
+    public static double Gmst82Rad(JulianDateUt1 ut1)
     {
         double centuries = (ut1.Day - 2451545.0 + ut1.FractionOfDay) / 36525.0;
         double seconds = 24110.54841
@@ -30,7 +30,7 @@ public static class EarthRotation
     /// <param name="ut1">Instant of the state on the UT1 scale.</param>
     public static EcefState ToEcef(in TemeState state, JulianDateUt1 ut1)
     {
-        (double sin, double cos) = Math.SinCos(GreenwichMeanSiderealTimeRad(ut1));
+        (double sin, double cos) = Math.SinCos(Gmst82Rad(ut1));
         Vector3D position = TurnForward(state.PositionKm, sin, cos);
         Vector3D velocity = TurnForward(state.VelocityKmPerS, sin, cos);
         return new EcefState(
@@ -43,7 +43,7 @@ public static class EarthRotation
     /// <param name="ut1">Instant on the UT1 scale.</param>
     public static Vector3D ToEcef(in Vector3D vector, JulianDateUt1 ut1)
     {
-        (double sin, double cos) = Math.SinCos(GreenwichMeanSiderealTimeRad(ut1));
+        (double sin, double cos) = Math.SinCos(Gmst82Rad(ut1));
         return TurnForward(vector, sin, cos);
     }
 
@@ -61,12 +61,21 @@ public static class EarthRotation
     /// <param name="ut1">Instant of the state on the UT1 scale.</param>
     public static TemeState ToTeme(in EcefState state, JulianDateUt1 ut1)
     {
-        (double sin, double cos) = Math.SinCos(GreenwichMeanSiderealTimeRad(ut1));
+        (double sin, double cos) = Math.SinCos(Gmst82Rad(ut1));
         Vector3D position = state.PositionKm;
         Vector3D velocity = state.VelocityKmPerS;
         var inertial = new Vector3D(
             velocity.X - (RateRadPerS * position.Y), velocity.Y + (RateRadPerS * position.X), velocity.Z);
         return new TemeState(TurnForward(position, -sin, cos), TurnForward(inertial, -sin, cos));
+    }
+
+    /// <summary>Turns an Earth-fixed vector (a direction, or a position) into TEME.</summary>
+    /// <param name="vector">Vector, Earth-fixed.</param>
+    /// <param name="ut1">Instant on the UT1 scale.</param>
+    public static Vector3D ToTeme(in Vector3D vector, JulianDateUt1 ut1)
+    {
+        (double sin, double cos) = Math.SinCos(Gmst82Rad(ut1));
+        return TurnForward(vector, -sin, cos);
     }
 
     private static Vector3D TurnForward(in Vector3D v, double sin, double cos)

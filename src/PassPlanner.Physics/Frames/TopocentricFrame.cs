@@ -9,24 +9,24 @@ public sealed class TopocentricFrame
     private const double DegPerRad = 180.0 / Math.PI;
 
     /// <summary>Builds the frame of a station.</summary>
-    /// <param name="station">Latitude -90 to 90 degrees, longitude -180 to 360 degrees, height -1,000 to 100,000 m.</param>
+    /// <param name="position">Latitude -90 to 90 degrees, longitude -180 to 360 degrees, height -1,000 to 100,000 m.</param>
     /// <exception cref="ArgumentOutOfRangeException">A coordinate is outside its range or not finite.</exception>
-    public TopocentricFrame(GeodeticPosition station)
+    public TopocentricFrame(GeodeticPosition position)
     {
-        Require(station.LatitudeDeg is >= -90.0 and <= 90.0, nameof(station.LatitudeDeg), station.LatitudeDeg, "degrees, -90 to 90");
-        Require(station.LongitudeDeg is >= -180.0 and <= 360.0, nameof(station.LongitudeDeg), station.LongitudeDeg, "degrees, -180 to 360");
-        Require(station.HeightM is >= -1000.0 and <= 100000.0, nameof(station.HeightM), station.HeightM, "m, -1000 to 100000");
-        Station = station;
-        PositionKm = Wgs84.ToEcefKm(station);
-        (double sinLatitude, double cosLatitude) = Math.SinCos(station.LatitudeDeg / DegPerRad);
-        (double sinLongitude, double cosLongitude) = Math.SinCos(station.LongitudeDeg / DegPerRad);
+        Require(position.LatitudeDeg is >= -90.0 and <= 90.0, nameof(position.LatitudeDeg), position.LatitudeDeg, "degrees, -90 to 90");
+        Require(position.LongitudeDeg is >= -180.0 and <= 360.0, nameof(position.LongitudeDeg), position.LongitudeDeg, "degrees, -180 to 360");
+        Require(position.HeightM is >= -1000.0 and <= 100000.0, nameof(position.HeightM), position.HeightM, "m, -1000 to 100000");
+        Position = position;
+        PositionKm = Wgs84.ToEcefKm(position);
+        (double sinLatitude, double cosLatitude) = Math.SinCos(position.LatitudeDeg / DegPerRad);
+        (double sinLongitude, double cosLongitude) = Math.SinCos(position.LongitudeDeg / DegPerRad);
         East = new Vector3D(-sinLongitude, cosLongitude, 0.0);
         North = new Vector3D(-sinLatitude * cosLongitude, -sinLatitude * sinLongitude, cosLatitude);
         Up = new Vector3D(cosLatitude * cosLongitude, cosLatitude * sinLongitude, sinLatitude);
     }
 
     /// <summary>Where the station is.</summary>
-    public GeodeticPosition Station { get; }
+    public GeodeticPosition Position { get; }
 
     /// <summary>Earth-fixed position of the station, km.</summary>
     public Vector3D PositionKm { get; }
@@ -45,14 +45,9 @@ public sealed class TopocentricFrame
     public LookAngles Look(in EcefState spacecraft)
     {
         Vector3D sight = spacecraft.PositionKm - PositionKm;
-        double east = sight.Dot(East);
-        double north = sight.Dot(North);
+        (double azimuthDeg, double elevationDeg) = Direction(sight);
         double rangeKm = sight.Norm;
-        return new LookAngles(
-            AzimuthDeg(east, north),
-            Math.Atan2(sight.Dot(Up), Math.Sqrt((east * east) + (north * north))) * DegPerRad,
-            rangeKm,
-            sight.Dot(spacecraft.VelocityKmPerS) / rangeKm);
+        return new LookAngles(azimuthDeg, elevationDeg, rangeKm, sight.Dot(spacecraft.VelocityKmPerS) / rangeKm);
     }
 
     /// <summary>Sine of the geometric elevation of an Earth-fixed position: the cheap test against a level horizon.</summary>
@@ -63,18 +58,20 @@ public sealed class TopocentricFrame
         return sight.Dot(Up) / sight.Norm;
     }
 
-    /// <summary>Azimuth of an Earth-fixed position, degrees clockwise from north, 0 to below 360.</summary>
-    /// <param name="positionKm">Earth-fixed position, km.</param>
-    public double AzimuthDeg(in Vector3D positionKm)
+    /// <summary>Azimuth (0 to below 360) and elevation, degrees, of an Earth-fixed vector from the station, of any length.</summary>
+    /// <param name="sight">Vector, not zero.</param>
+    public (double AzimuthDeg, double ElevationDeg) Direction(in Vector3D sight)
     {
-        Vector3D sight = positionKm - PositionKm;
-        return AzimuthDeg(sight.Dot(East), sight.Dot(North));
+        double east = sight.Dot(East);
+        double north = sight.Dot(North);
+        double elevation = Math.Atan2(sight.Dot(Up), Math.Sqrt((east * east) + (north * north)));
+        return (AzimuthDeg(east, north), elevation * DegPerRad);
     }
 
     /// <summary>Earth-fixed unit vector of a direction that the station looks in.</summary>
     /// <param name="azimuthDeg">Clockwise from true north, degrees.</param>
     /// <param name="elevationDeg">Above the local level, degrees, -90 to 90.</param>
-    public Vector3D Direction(double azimuthDeg, double elevationDeg)
+    public Vector3D UnitVector(double azimuthDeg, double elevationDeg)
     {
         (double sinAzimuth, double cosAzimuth) = Math.SinCos(azimuthDeg / DegPerRad);
         (double sinElevation, double cosElevation) = Math.SinCos(elevationDeg / DegPerRad);

@@ -75,6 +75,10 @@ public static class ElementSetAge
         return slope > 0.0 ? Math.Min(LongestLimitHours, 24.0 * 2.0 * rest / slope) : LongestLimitHours;
     }
 
+    /// <summary>The age past which a set is stale, h, by the class of its orbit.</summary>
+    /// <param name="elements">The set.</param>
+    public static double LimitHours(ElementSet elements) => LimitHours(ClassOf(elements));
+
     /// <summary>Age of a set at an instant, h; negative before its epoch.</summary>
     /// <param name="elements">The set.</param>
     /// <param name="instant">Instant, UTC.</param>

@@ -48,7 +48,7 @@ public sealed class Sgp4Propagator
             // published states of orbits that the Moon disturbs strongly show it (23333: 4 mm at perigee).
             double julianDate = epoch.Day + epoch.FractionOfDay;
             double days1950 = julianDate - 2433281.5;
-            deepSpace = new Sgp4DeepSpace(c, gravity, days1950, EarthRotation.GreenwichMeanSiderealTimeRad(epoch));
+            deepSpace = new Sgp4DeepSpace(c, gravity, days1950, EarthRotation.Gmst82Rad(epoch));
         }
     }
 

@@ -17,14 +17,9 @@ public sealed class SpacecraftTrajectory
     /// <param name="ut1MinusUtcS">UT1-UTC, s, -1 to 1; 0 when no table is loaded.</param>
     /// <exception cref="ArgumentException">There is no set.</exception>
     /// <exception cref="ArgumentOutOfRangeException">UT1-UTC or an element is outside its range.</exception>
-    public SpacecraftTrajectory(IReadOnlyList<ElementSet> elementSets, double ut1MinusUtcS)
+    public SpacecraftTrajectory(IEnumerable<ElementSet> elementSets, double ut1MinusUtcS)
     {
         ArgumentNullException.ThrowIfNull(elementSets);
-        if (elementSets.Count == 0)
-        {
-            throw new ArgumentException("elementSets is empty; a trajectory needs at least one element set.", nameof(elementSets));
-        }
-
         if (!(Math.Abs(ut1MinusUtcS) <= 1.0))
         {
             throw new ArgumentOutOfRangeException(nameof(ut1MinusUtcS), ut1MinusUtcS, "ut1MinusUtcS must be s, -1 to 1.");
@@ -35,6 +30,11 @@ public sealed class SpacecraftTrajectory
             .GroupBy(set => set.EpochUtc)
             .OrderBy(group => group.Key)
             .Select(group => new Sgp4Propagator(group.Last()))];
+        if (propagators.Length == 0)
+        {
+            throw new ArgumentException("elementSets is empty; it must have at least one element set.", nameof(elementSets));
+        }
+
         epochTicks = [.. propagators.Select(propagator => propagator.Elements.EpochUtc.Ticks)];
     }
 

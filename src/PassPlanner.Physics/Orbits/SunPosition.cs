@@ -38,17 +38,13 @@ public static class SunPosition
     public static Vector3D EcefKm(UtcInstant instant, double ut1MinusUtcS)
         => EarthRotation.ToEcef(TemeKm(instant), instant.ToUt1(ut1MinusUtcS));
 
-    /// <summary>
-    /// Where a station sees the Sun, with parallax, without refraction. The range rate is that of a Sun fixed among
-    /// the stars: the Earth's rotation only.
-    /// </summary>
-    /// <param name="instant">Instant, UTC.</param>
+    /// <summary>Where a station sees the Sun's centre: azimuth and elevation, degrees, with parallax, without refraction.</summary>
     /// <param name="station">The station.</param>
+    /// <param name="instant">Instant, UTC.</param>
     /// <param name="ut1MinusUtcS">UT1-UTC, s; 0 when no table is loaded.</param>
-    public static LookAngles Look(UtcInstant instant, TopocentricFrame station, double ut1MinusUtcS)
+    public static (double AzimuthDeg, double ElevationDeg) Look(TopocentricFrame station, UtcInstant instant, double ut1MinusUtcS)
     {
         ArgumentNullException.ThrowIfNull(station);
-        var sun = new TemeState(TemeKm(instant), default);
-        return station.Look(EarthRotation.ToEcef(sun, instant.ToUt1(ut1MinusUtcS)));
+        return station.Direction(EcefKm(instant, ut1MinusUtcS) - station.PositionKm);
     }
 }

@@ -1,28 +1,33 @@
-using PassPlanner.Physics.Frames;
 using PassPlanner.Physics.Orbits;
 using PassPlanner.Physics.Time;
 
 namespace PassPlanner.Planning.Passes;
 
 /// <summary>
-/// Earth-fixed states of a spacecraft on even nodes over a period: worked out once and shared by every station. The
-/// grid ends where the propagation fails. Immutable once built.
+/// Earth-fixed states of a spacecraft over a period, by SGP4 itself on nodes that follow its motion: worked out once
+/// and shared by every station. The grid ends where the propagation fails. Immutable once built; any number of threads may use it.
 /// </summary>
 public sealed class EphemerisGrid
 {
-    private const double StepNearEarthS = 60;
-    private const double StepHighS = 300;
-    private const double FailureResolutionS = 0.1;
+    private const int BlocksBetweenCancellationChecks = 256;
 
-    private readonly EcefState[] nodes;
-
-    private EphemerisGrid(SpacecraftTrajectory trajectory, TimeWindow period, double stepS, EcefState[] nodes, PropagationFailure? failure)
+    private EphemerisGrid(
+        SpacecraftTrajectory trajectory, TimeWindow period, EphemerisNode[] nodes, long firstBlock, long lastBlock, PropagationFailure? failure)
     {
         Trajectory = trajectory;
         Period = period;
-        StepS = stepS;
-        this.nodes = nodes;
+        Nodes = nodes;
+        FirstBlock = firstBlock;
+        LastBlock = lastBlock;
         Failure = failure;
+        XKm = Array.ConvertAll(nodes, node => node.State.PositionKm.X);
+        YKm = Array.ConvertAll(nodes, node => node.State.PositionKm.Y);
+        ZKm = Array.ConvertAll(nodes, node => node.State.PositionKm.Z);
+        Segments = new SegmentBounds[Math.Max(0, nodes.Length - 1)];
+        for (int i = 0; i < Segments.Length; i++)
+        {
+            Segments[i] = SegmentBounds.Between(nodes[i], nodes[i + 1]);
+        }
     }
 
     /// <summary>Trajectory behind the grid.</summary>
@@ -31,62 +36,58 @@ public sealed class EphemerisGrid
     /// <summary>Period asked for.</summary>
     public TimeWindow Period { get; }
 
-    /// <summary>Time between nodes, s.</summary>
-    public double StepS { get; }
+    /// <summary>Number of nodes; 0 when there is no position at the start.</summary>
+    public int NodeCount => Nodes.Length;
 
-    /// <summary>States; the first at the start of the period, the last at its end or the last node before a failure.</summary>
-    public ReadOnlySpan<EcefState> Nodes => nodes;
-
-    /// <summary>Where the propagation fails; nothing when it does not.</summary>
+    /// <summary>Where the propagation ends, a few minutes past the period at most; nothing when it does not.</summary>
     public PropagationFailure? Failure { get; }
 
+    internal EphemerisNode[] Nodes { get; }
+
+    /// <summary>The positions of the nodes once more, as columns, for the test that every station makes of every node.</summary>
+    internal double[] XKm { get; }
+
+    internal double[] YKm { get; }
+
+    internal double[] ZKm { get; }
+
+    internal SegmentBounds[] Segments { get; }
+
+    internal long FirstBlock { get; }
+
+    internal long LastBlock { get; }
+
     /// <summary>Propagates a spacecraft over a period.</summary>
+    /// <param name="trajectory">The spacecraft.</param>
+    /// <param name="period">Period, not empty, between 1957 and 2100.</param>
+    /// <param name="cancellation">Ends the work early.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The period is empty or outside the years.</exception>
     public static EphemerisGrid Build(SpacecraftTrajectory trajectory, TimeWindow period, CancellationToken cancellation)
     {
-        int steps = Math.Max(1, (int)Math.Ceiling(period.DurationS / StepFor(trajectory.ServingSet(period.StartUtc))));
-        double stepS = period.DurationS / steps;
-        var nodes = new EcefState[steps + 1];
-        for (int i = 0; i <= steps; i++)
+        ArgumentNullException.ThrowIfNull(trajectory);
+        if (period.EndUtc <= period.StartUtc || period.StartUtc < UtcInstant.Earliest || period.EndUtc > UtcInstant.Latest)
         {
-            if (i % 4096 == 0)
+            throw new ArgumentOutOfRangeException(
+                nameof(period), $"{period.StartUtc} to {period.EndUtc}", "period must not be empty and must lie between 1957 and 2100, UTC.");
+        }
+
+        var lattice = new EphemerisLattice(trajectory);
+        long first = EphemerisLattice.BlockOf(period.StartUtc);
+        long last = EphemerisLattice.BlockOf(new UtcInstant(period.EndUtc.Ticks - 1));
+        var nodes = new List<EphemerisNode>((int)Math.Min(1 << 20, (last - first + 1) * 8) + 1);
+        for (long block = first; block <= last; block++)
+        {
+            if ((block - first) % BlocksBetweenCancellationChecks == 0)
             {
                 cancellation.ThrowIfCancellationRequested();
             }
 
-            Sgp4Status status = trajectory.TryEcef(period.StartUtc.AddSeconds(i * stepS), out nodes[i]);
-            if (status != Sgp4Status.Ok)
+            if (!lattice.AddBlock(block, nodes))
             {
-                var failure = new PropagationFailure(status, FirstFailure(trajectory, period, stepS, i));
-                return new EphemerisGrid(trajectory, period, stepS, nodes[..i], failure);
+                break;
             }
         }
 
-        return new EphemerisGrid(trajectory, period, stepS, nodes, null);
-    }
-
-    /// <summary>
-    /// Node spacing: a minute near the Earth and for eccentric orbits, whose perigee is fast; five minutes for high
-    /// round ones. Extremes of the elevation between nodes are found from its rate.
-    /// </summary>
-    private static double StepFor(ElementSet elements) =>
-        elements.MeanMotionRevPerDay < 6.4 && elements.Eccentricity < 0.1 ? StepHighS : StepNearEarthS;
-
-    private static UtcInstant FirstFailure(SpacecraftTrajectory trajectory, TimeWindow period, double stepS, int failedNode)
-    {
-        if (failedNode == 0)
-        {
-            return period.StartUtc;
-        }
-
-        double goodS = (failedNode - 1) * stepS;
-        double badS = failedNode * stepS;
-        while (badS - goodS > FailureResolutionS)
-        {
-            double middleS = (goodS + badS) / 2;
-            bool fails = trajectory.TryTeme(period.StartUtc.AddSeconds(middleS), out _) != Sgp4Status.Ok;
-            (goodS, badS) = fails ? (goodS, middleS) : (middleS, badS);
-        }
-
-        return period.StartUtc.AddSeconds(badS);
+        return new EphemerisGrid(trajectory, period, [.. nodes], first, last, lattice.Failure);
     }
 }

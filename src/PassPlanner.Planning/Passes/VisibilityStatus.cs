@@ -1,9 +1,9 @@
 namespace PassPlanner.Planning.Passes;
 
-/// <summary>How a spacecraft stands to a station's horizon during a period.</summary>
+/// <summary>How a spacecraft stands to a station's horizon mask during a period.</summary>
 public enum VisibilityStatus
 {
-    /// <summary>Below it throughout.</summary>
+    /// <summary>Below it throughout, or without a position.</summary>
     NeverUp,
 
     /// <summary>It rises or sets.</summary>

@@ -21,7 +21,7 @@ public sealed class FrameTests
     public void Mean_sidereal_time_matches_the_test_value_of_the_standards_library()
     {
         // ERFA 2.0, t_erfa_c.c, t_gmst82: 2006-01-01T00:00 UT1, to 1e-12 rad.
-        double gmst = EarthRotation.GreenwichMeanSiderealTimeRad(new JulianDateUt1(2453736.5, 0.0));
+        double gmst = EarthRotation.Gmst82Rad(new JulianDateUt1(2453736.5, 0.0));
         Assert.Equal(1.754174981860675096, gmst, 1e-12);
     }
 
@@ -62,7 +62,7 @@ public sealed class FrameTests
             .Sample((latitude, longitude, azimuth, elevation, range) =>
             {
                 var frame = new TopocentricFrame(new GeodeticPosition(latitude, longitude, 250.0));
-                Vector3D direction = frame.Direction(azimuth, elevation);
+                Vector3D direction = frame.UnitVector(azimuth, elevation);
                 LookAngles look = frame.Look(new EcefState(frame.PositionKm + (direction * range), direction * 3.0));
                 Assert.True(Math.Abs(Math.IEEERemainder(look.AzimuthDeg - azimuth, 360.0)) < MicrodegreeDeg);
                 Assert.InRange(look.AzimuthDeg, 0.0, 360.0 - 1e-13);

@@ -32,8 +32,8 @@ public sealed class TrackTests(ITestOutputHelper output)
             Assert.True(UtcInstant.TryParse(row["utc"], out UtcInstant instant));
             Assert.Equal(Sgp4Status.Ok, trajectory.TryEcef(instant, out EcefState state));
             LookAngles look = station.Look(state);
-            double skyDeg = DegPerRad * station.Direction(look.AzimuthDeg, look.ElevationDeg)
-                .AngleToRad(station.Direction(Number(row, "azimuth_deg"), Number(row, "elevation_deg")));
+            double skyDeg = DegPerRad * station.UnitVector(look.AzimuthDeg, look.ElevationDeg)
+                .AngleToRad(station.UnitVector(Number(row, "azimuth_deg"), Number(row, "elevation_deg")));
             double elevationDeg = Math.Abs(look.ElevationDeg - Number(row, "elevation_deg"));
             double rangeKm = Math.Abs(look.SlantRangeKm - Number(row, "range_km"));
             double rateKmPerS = Math.Abs(look.RangeRateKmPerS - Number(row, "range_rate_km_s"));

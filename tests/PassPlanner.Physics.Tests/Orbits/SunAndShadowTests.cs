@@ -24,9 +24,9 @@ public sealed class SunAndShadowTests(ITestOutputHelper output)
         double worstDeg = 0;
         foreach (IReadOnlyDictionary<string, string> row in rows)
         {
-            LookAngles look = SunPosition.Look(Instant(row), stations[row["station_id"]], 0.0);
-            double elevationErrorDeg = Math.Abs(look.ElevationDeg - Number(row, "sun_elevation_deg"));
-            double azimuthErrorDeg = Math.Abs(look.AzimuthDeg - Number(row, "sun_azimuth_deg")) * Math.Cos(look.ElevationDeg / DegPerRad);
+            (double azimuthDeg, double elevationDeg) = SunPosition.Look(stations[row["station_id"]], Instant(row), 0.0);
+            double elevationErrorDeg = Math.Abs(elevationDeg - Number(row, "sun_elevation_deg"));
+            double azimuthErrorDeg = Math.Abs(azimuthDeg - Number(row, "sun_azimuth_deg")) * Math.Cos(elevationDeg / DegPerRad);
             double errorDeg = Math.Max(elevationErrorDeg, azimuthErrorDeg);
             Assert.True(errorDeg <= OneHundredthOfADegreeDeg, $"{row["station_id"]} {row["utc"]}: {errorDeg} deg");
             worstDeg = Math.Max(worstDeg, errorDeg);

@@ -1,0 +1,60 @@
+using System.Text;
+using System.Text.Json;
+
+namespace PassPlanner.Exchange.ElementSets;
+
+/// <summary>Reads messages in JSON: one object of keywords, or a list of them; numbers may be written as texts.</summary>
+internal static class OmmJsonReader
+{
+    public static void Read(string text, ReadingSink sink)
+    {
+        byte[] bytes = Encoding.UTF8.GetBytes(text);
+        var lines = new LineIndex(bytes);
+        var reader = new Utf8JsonReader(bytes, new JsonReaderOptions { MaxDepth = 16, CommentHandling = JsonCommentHandling.Skip });
+        try
+        {
+            ReadMessages(ref reader, lines, sink);
+        }
+        catch (JsonException bad)
+        {
+            sink.Refuse((int)(bad.LineNumber ?? 0) + 1, (int)(bad.BytePositionInLine ?? 0) + 1, "the text is not JSON from here on");
+        }
+    }
+
+    private static void ReadMessages(ref Utf8JsonReader reader, LineIndex lines, ReadingSink sink)
+    {
+        OmmMessage? message = null;
+        string keyword = "";
+        while (reader.Read())
+        {
+            Place at = lines.PlaceOf(reader.TokenStartIndex);
+            switch (reader.TokenType)
+            {
+                case JsonTokenType.StartObject when message is null:
+                    message = new OmmMessage(at.LineNumber);
+                    break;
+                case JsonTokenType.StartObject or JsonTokenType.StartArray when message is not null:
+                    reader.Skip();
+                    break;
+                case JsonTokenType.PropertyName:
+                    keyword = reader.GetString()!;
+                    break;
+                case JsonTokenType.String or JsonTokenType.Number when message is not null:
+                    string value = reader.TokenType == JsonTokenType.String ? reader.GetString()! : Encoding.UTF8.GetString(reader.ValueSpan);
+                    message.Set(keyword, value.Trim(), at);
+                    break;
+                case JsonTokenType.EndObject:
+                    message?.Finish(sink);
+                    message = null;
+                    break;
+                case JsonTokenType.StartArray or JsonTokenType.EndArray or JsonTokenType.Null or JsonTokenType.True or JsonTokenType.False when message is not null || reader.CurrentDepth == 0:
+                    break;
+                case JsonTokenType.StartArray or JsonTokenType.EndArray:
+                    break;
+                default:
+                    sink.Refuse(at.LineNumber, at.Column, "a list of element sets holds objects, not values");
+                    break;
+            }
+        }
+    }
+}

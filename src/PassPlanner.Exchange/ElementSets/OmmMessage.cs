@@ -1,0 +1,91 @@
+using PassPlanner.Physics.Orbits;
+
+namespace PassPlanner.Exchange.ElementSets;
+
+/// <summary>
+/// The keywords of one orbit mean-elements message (CCSDS 502.0-B-3, tables 4-1 to 4-3) and where they stand. Keywords
+/// that do not matter here are passed over.
+/// </summary>
+internal sealed class OmmMessage(int lineNumber)
+{
+    private readonly Dictionary<string, (string Value, Place At)> keywords = new(StringComparer.OrdinalIgnoreCase);
+
+    public int LineNumber { get; } = lineNumber;
+
+    public bool IsEmpty => keywords.Count == 0;
+
+    /// <summary>Sets a keyword; the last of two wins. An empty value counts as absent.</summary>
+    public void Set(string keyword, string value, Place at)
+    {
+        if (value.Length > 0)
+        {
+            keywords[keyword] = (value, at);
+        }
+    }
+
+    /// <summary>Hands the element set on, or the first thing that is wrong with it.</summary>
+    public void Finish(ReadingSink sink)
+    {
+        var fields = new FieldParser();
+        ElementSet set = Build(fields);
+        if (fields.Refusal is { } refusal)
+        {
+            sink.Refuse(refusal);
+        }
+        else
+        {
+            sink.Accept(set, LineNumber);
+        }
+    }
+
+    private ElementSet Build(FieldParser fields)
+    {
+        Expect("TIME_SYSTEM", fields, "UTC");
+        Expect("REF_FRAME", fields, "TEME");
+        Expect("CENTER_NAME", fields, "EARTH");
+        Expect("MEAN_ELEMENT_THEORY", fields, "SGP4", "SGP/SGP4");
+        return new ElementSet
+        {
+            CatalogNumber = Required("NORAD_CAT_ID", fields, fields.CatalogNumber),
+            Name = Text("OBJECT_NAME"),
+            InternationalDesignator = Text("OBJECT_ID"),
+            Classification = Text("CLASSIFICATION_TYPE") is { Length: > 0 } classification ? classification[0] : 'U',
+            EpochUtc = Required("EPOCH", fields, fields.Epoch),
+            MeanMotionRevPerDay = Required("MEAN_MOTION", fields, fields.MeanMotion),
+            Eccentricity = Required("ECCENTRICITY", fields, fields.Eccentricity),
+            InclinationDeg = Required("INCLINATION", fields, fields.Inclination),
+            RightAscensionOfNodeDeg = Required("RA_OF_ASC_NODE", fields, (text, at) => fields.Angle(text, at, "right ascension of the node")),
+            ArgumentOfPerigeeDeg = Required("ARG_OF_PERICENTER", fields, (text, at) => fields.Angle(text, at, "argument of perigee")),
+            MeanAnomalyDeg = Required("MEAN_ANOMALY", fields, (text, at) => fields.Angle(text, at, "mean anomaly")),
+            BStarPerEarthRadius = Required("BSTAR", fields, fields.BStar),
+            MeanMotionDotRevPerDay2 = Optional("MEAN_MOTION_DOT", fields.MeanMotionDot),
+            MeanMotionDdotRevPerDay3 = Optional("MEAN_MOTION_DDOT", fields.MeanMotionDdot),
+            ElementSetNumber = Optional("ELEMENT_SET_NO", (text, at) => fields.Count(text, at, "element set number")),
+            RevolutionNumber = Optional("REV_AT_EPOCH", (text, at) => fields.Count(text, at, "revolution number")),
+        };
+    }
+
+    private string Text(string keyword) => keywords.TryGetValue(keyword, out (string Value, Place At) found) ? found.Value : "";
+
+    private T? Optional<T>(string keyword, Func<string, Place, T> parse) =>
+        keywords.TryGetValue(keyword, out (string Value, Place At) found) ? parse(found.Value, found.At) : default;
+
+    private T? Required<T>(string keyword, FieldParser fields, Func<string, Place, T> parse)
+    {
+        if (keywords.TryGetValue(keyword, out (string Value, Place At) found))
+        {
+            return parse(found.Value, found.At);
+        }
+
+        fields.Refuse(new Place(LineNumber, 1), $"{keyword} is missing from the message that begins here");
+        return default;
+    }
+
+    private void Expect(string keyword, FieldParser fields, params string[] allowed)
+    {
+        if (keywords.TryGetValue(keyword, out (string Value, Place At) found) && !allowed.Contains(found.Value, StringComparer.OrdinalIgnoreCase))
+        {
+            fields.Refuse(found.At, $"{keyword} is {FieldParser.Quoted(found.Value)}; it must be {string.Join(" or ", allowed)}");
+        }
+    }
+}

@@ -174,13 +174,13 @@ internal sealed class TwoLineReader(ReadingSink sink, bool acceptBadChecksums)
     /// <summary>A name without the "0 " that some sources put before it.</summary>
     private static string NameOf(string line) => (line.StartsWith("0 ", StringComparison.Ordinal) ? line[2..] : line).Trim();
 
-    /// <summary>1998-067A from "98067A  "; empty when blank or in no such form.</summary>
+    /// <summary>1998-067A from "98067A  "; a designator in another form as it stands, empty when blank.</summary>
     private static string Designator(string field)
     {
         string text = field.Trim();
         return text.Length is >= 6 and <= 8 && text[..5].All(char.IsAsciiDigit)
             ? $"{(string.CompareOrdinal(text[..2], "57") < 0 ? "20" : "19")}{text[..2]}-{text[2..]}"
-            : "";
+            : text;
     }
 
     private static string Filled(string field) => field.Replace(' ', '0');

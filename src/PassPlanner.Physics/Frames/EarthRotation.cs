@@ -47,15 +47,6 @@ public static class EarthRotation
         return TurnForward(vector, sin, cos);
     }
 
-    /// <summary>An Earth-fixed vector in TEME axes, without the velocity of the rotation.</summary>
-    /// <param name="vector">Vector in Earth-fixed axes, any unit.</param>
-    /// <param name="ut1">Instant on the UT1 scale.</param>
-    public static Vector3D ToTeme(in Vector3D vector, JulianDateUt1 ut1)
-    {
-        (double sin, double cos) = Math.SinCos(GreenwichMeanSiderealTimeRad(ut1));
-        return TurnForward(vector, -sin, cos);
-    }
-
     /// <summary>Turns an Earth-fixed state into TEME, with the inertial velocity.</summary>
     /// <param name="state">Position, km, and velocity relative to the rotating Earth, km/s.</param>
     /// <param name="ut1">Instant of the state on the UT1 scale.</param>

@@ -91,7 +91,7 @@ public static class PassesApi
         (PlanningModel model, IReadOnlyList<PredictedPass> all) = Find(spacecraft, station, instantUtc, cache, cancellation);
         PredictedPass predicted = Choose(all, new QueryReader(request.Query), "antenna", "link");
         PassAddress address = PassWriter.AddressOf(predicted);
-        LookAngles sun = SunPosition.Look(predicted.Pass.MaximumElevationUtc, model.FrameOf(predicted.Station), cache.Ut1MinusUtcS);
+        LookAngles sun = SunPosition.Look(model.FrameOf(predicted.Station), predicted.Pass.MaximumElevationUtc, cache.Ut1MinusUtcS);
         return TypedResults.Ok(new PassDetailResponse(PassWriter.Item(predicted))
         {
             BudgetUrl = address.Of("/budget"),

@@ -66,10 +66,10 @@ public sealed class FrameTests
                 LookAngles look = frame.Look(new EcefState(frame.PositionKm + (direction * range), direction * 3.0));
                 Assert.True(Math.Abs(Math.IEEERemainder(look.AzimuthDeg - azimuth, 360.0)) < MicrodegreeDeg);
                 Assert.InRange(look.AzimuthDeg, 0.0, 360.0 - 1e-13);
-                Assert.Equal(elevation, look.ElevationDeg, 8);
-                Assert.Equal(range, look.SlantRangeKm, 8);
-                Assert.Equal(3.0, look.RangeRateKmPerS, 10);
-                Assert.Equal(Math.Sin(look.ElevationDeg * Math.PI / 180), frame.SinElevation(frame.PositionKm + (direction * range)), 10);
+                Assert.Equal(elevation, look.ElevationDeg, 1e-8);
+                Assert.Equal(range, look.SlantRangeKm, 1e-8);
+                Assert.Equal(3.0, look.RangeRateKmPerS, 1e-10);
+                Assert.Equal(Math.Sin(look.ElevationDeg * Math.PI / 180), frame.SinElevation(frame.PositionKm + (direction * range)), 1e-10);
             });
 
     [Theory]

@@ -1,6 +1,5 @@
 using System.Text;
 using Microsoft.AspNetCore.Http.HttpResults;
-using PassPlanner.Physics.Frames;
 using PassPlanner.Physics.Links;
 using PassPlanner.Physics.Orbits;
 using PassPlanner.Physics.Time;
@@ -91,7 +90,7 @@ public static class PassesApi
         (PlanningModel model, IReadOnlyList<PredictedPass> all) = Find(spacecraft, station, instantUtc, cache, cancellation);
         PredictedPass predicted = Choose(all, new QueryReader(request.Query), "antenna", "link");
         PassAddress address = PassWriter.AddressOf(predicted);
-        LookAngles sun = SunPosition.Look(model.FrameOf(predicted.Station), predicted.Pass.MaximumElevationUtc, cache.Ut1MinusUtcS);
+        (double sunAzimuthDeg, double sunElevationDeg) = SunPosition.Look(model.FrameOf(predicted.Station), predicted.Pass.MaximumElevationUtc, cache.Ut1MinusUtcS);
         return TypedResults.Ok(new PassDetailResponse(PassWriter.Item(predicted))
         {
             BudgetUrl = address.Of("/budget"),
@@ -102,7 +101,7 @@ public static class PassesApi
             Waveforms = [.. predicted.Chain.Ladder.Waveforms.Select((_, index) => WaveformOf(predicted.Chain, index))],
             MostRobustWaveform = predicted.Chain.Ladder.MostRobust,
             BestUtc = predicted.Assessment.BestUtc.ToString(),
-            Sun = new SunResponse { AzimuthDeg = Math.Round(sun.AzimuthDeg, 3), ElevationDeg = Math.Round(sun.ElevationDeg, 3) },
+            Sun = new SunResponse { AzimuthDeg = Math.Round(sunAzimuthDeg, 3), ElevationDeg = Math.Round(sunElevationDeg, 3) },
             Alternatives = [.. all.Where(p => p != predicted).Select(AlternativeOf)],
             Models = ModelsUsed.For(cache.Ut1MinusUtcS),
         });

@@ -210,6 +210,49 @@ public sealed class PassFinderTests
     }
 
     [Fact]
+    public void A_mask_that_touches_the_lowest_point_of_a_long_pass_opens_a_gap_there()
+    {
+        const double MicrodegreeDeg = 1e-6;
+        (SpacecraftTrajectory trajectory, TopocentricFrame station) = Scene(41866, "MARL");
+        UtcInstant lowestUtc = Period.StartUtc.AddSeconds(3600);
+        for (int stepS = 600; stepS >= 1; stepS /= 4)
+        {
+            lowestUtc = Enumerable.Range(-200, 401).Select(k => lowestUtc.AddSeconds(k * stepS))
+                .Where(instant => instant.SecondsSince(Period.StartUtc) is > 3600.0 and < 90000.0)
+                .MinBy(instant => Look(trajectory, station, instant).ElevationDeg);
+        }
+
+        double lowestDeg = Look(trajectory, station, lowestUtc).ElevationDeg;
+        bool HasGap(double maskDeg)
+        {
+            var near = new TimeWindow(lowestUtc.AddSeconds(-1800), lowestUtc.AddSeconds(1800));
+            PassSearch search = PassFinder.Find(trajectory, station, HorizonMask.Constant(maskDeg), near, CancellationToken.None);
+            return search.Passes.All(pass => !pass.Window.Contains(lowestUtc));
+        }
+
+        Assert.True(HasGap(lowestDeg + MicrodegreeDeg));
+        Assert.False(HasGap(lowestDeg - MicrodegreeDeg));
+    }
+
+    [Fact]
+    public void The_first_failure_is_found_even_where_SGP4_recovers_within_seconds()
+    {
+        const int LookBackS = 7200;
+        for (int k = 0; k < 24; k++)
+        {
+            ElementSet set = ReferenceScene.Sets[49975] with { ArgumentOfPerigeeDeg = k * 15.0 };
+            var trajectory = new SpacecraftTrajectory([set], 0.0);
+            if (EphemerisGrid.Build(trajectory, Period, CancellationToken.None).Failure is { } failure)
+            {
+                for (int s = 1; s < LookBackS && failure.FirstUtc.AddSeconds(-s) > Period.StartUtc; s++)
+                {
+                    Assert.Equal(Sgp4Status.Ok, trajectory.TryTeme(failure.FirstUtc.AddSeconds(-s), out _));
+                }
+            }
+        }
+    }
+
+    [Fact]
     public void A_newer_set_serves_from_its_epoch_on()
     {
         (_, TopocentricFrame station) = Scene(25544, "MARL");

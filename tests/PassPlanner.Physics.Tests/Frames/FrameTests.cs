@@ -26,6 +26,12 @@ public sealed class FrameTests
     }
 
     [Fact]
+    public void A_state_can_be_printed()
+        => Assert.Equal(
+            "EcefState { PositionKm = (1, 2.5, -3), VelocityKmPerS = (0, 0, 0) }",
+            new EcefState(new Vector3D(1.0, 2.5, -3.0), default).ToString());
+
+    [Fact]
     public void A_turn_to_Earth_fixed_axes_and_back_returns_the_state()
     {
         Gen.Select(Gen.Double[-40000.0, 40000.0].Array[6], Gen.Long[0, 40000]).Sample((values, days) =>

@@ -49,7 +49,7 @@ public sealed class PassFinderTests
                         Assert.True(ExcessDeg(trajectory, station, pair.Mask, pass.Window.EndUtc.AddSeconds(MillisecondS)) < 0.0);
                     }
 
-                    for (int k = 1; k < 40; k++)
+                    for (int k = 1; k < 26; k++)
                     {
                         UtcInstant inside = pass.Window.StartUtc.AddSeconds(pass.Window.DurationS * k / 40.0);
                         LookAngles look = Look(trajectory, station, inside);
@@ -206,6 +206,50 @@ public sealed class PassFinderTests
             bool IsKept(double maskDeg) => Find(trajectory, station, HorizonMask.Constant(maskDeg)).Passes.Any(found => found.Window.Overlaps(pass.Window));
             Assert.True(IsKept(pass.MaximumElevationDeg - TenThousandthDeg));
             Assert.False(IsKept(pass.MaximumElevationDeg + TenThousandthDeg));
+        }
+    }
+
+    [Fact]
+    public void A_mask_that_touches_the_lowest_point_of_a_long_pass_opens_a_gap_there()
+    {
+        const double TenthOfAMicrodegreeDeg = 1e-7;
+        (SpacecraftTrajectory trajectory, TopocentricFrame station) = Scene(41866, "MARL");
+        UtcInstant lowestUtc = Period.StartUtc.AddSeconds(3600);
+        for (int stepS = 600; stepS >= 1; stepS /= 4)
+        {
+            lowestUtc = Enumerable.Range(-200, 401).Select(k => lowestUtc.AddSeconds(k * stepS))
+                .Where(instant => instant.SecondsSince(Period.StartUtc) is > 3600.0 and < 90000.0)
+                .MinBy(instant => Look(trajectory, station, instant).ElevationDeg);
+        }
+
+        double lowestDeg = Look(trajectory, station, lowestUtc).ElevationDeg;
+        bool HasGap(double maskDeg)
+        {
+            var near = new TimeWindow(lowestUtc.AddSeconds(-1800), lowestUtc.AddSeconds(1800));
+            PassSearch search = PassFinder.Find(trajectory, station, HorizonMask.Constant(maskDeg), near, CancellationToken.None);
+            return search.Passes.All(pass => !pass.Window.Contains(lowestUtc));
+        }
+
+        Assert.True(HasGap(lowestDeg + TenthOfAMicrodegreeDeg));
+        Assert.False(HasGap(lowestDeg - TenthOfAMicrodegreeDeg));
+    }
+
+    [Fact]
+    public void The_first_failure_is_found_even_where_SGP4_recovers_within_seconds()
+    {
+        // With these arguments of perigee the first time below one Earth radius shrinks from 3 minutes to 38 s, then to none.
+        const int LookBackS = 7200;
+        for (int k = 0; k < 26; k++)
+        {
+            ElementSet set = ReferenceScene.Sets[49975] with { ArgumentOfPerigeeDeg = 208.0 + (k * 0.1) };
+            var trajectory = new SpacecraftTrajectory([set], 0.0);
+            if (EphemerisGrid.Build(trajectory, Period, CancellationToken.None).Failure is { } failure)
+            {
+                for (int s = 1; s < LookBackS && failure.FirstUtc.AddSeconds(-s) > Period.StartUtc; s++)
+                {
+                    Assert.Equal(Sgp4Status.Ok, trajectory.TryTeme(failure.FirstUtc.AddSeconds(-s), out _));
+                }
+            }
         }
     }
 

@@ -14,9 +14,6 @@ public readonly record struct Vector3D(double X, double Y, double Z)
     /// <summary>Unit vector along this one; the vector must not be zero.</summary>
     public Vector3D Unit => this * (1 / Norm);
 
-    /// <summary>The components, for messages. (The text that a record makes by itself would hold Unit, and that its own Unit, without end.)</summary>
-    public override string ToString() => FormattableString.Invariant($"({X}, {Y}, {Z})");
-
     /// <summary>Scalar product.</summary>
     public double Dot(in Vector3D other) => (X * other.X) + (Y * other.Y) + (Z * other.Z);
 

@@ -19,11 +19,7 @@ public static class DemoScenario
     public const string ExampleTwoLines =
         "LARK 1\n"
         + "1 90001U 26001A   26077.50000000  .00001000  00000-0  50000-4 0  9996\n"
-        + "2 90001  97.5000 100.0000 0010000  90.0000 270.0000 15.20000000    14\n";
-
-    private const double EarthRadiusKm = 6378.135;
-    private const double J2 = 0.001082616;
-    private const double MinutesPerDay = 1440;
+        + "2 90001  97.5000 100.0000 0010000  90.0000 270.0000 15.20000000    12\n";
 
     /// <summary>The day on which the orbits below hold as written.</summary>
     private static readonly UtcInstant ReferenceUtc = UtcInstant.FromCalendar(2026, 1, 1);
@@ -33,7 +29,7 @@ public static class DemoScenario
         ("lark-1", 900000001, "LARK 1", 15.20, 97.45, 0.0011, 61.0, 20.0, 4.0e-5),
         ("lark-2", 900000002, "LARK 2", 15.20, 97.45, 0.0010, 61.0, 200.0, 4.0e-5),
         ("merle", 900000003, "MERLE", 14.90, 97.80, 0.0015, 148.0, 75.0, 2.0e-5),
-        ("siskin", 900000004, "SISKIN", 15.48, 51.64, 0.0006, 240.0, 310.0, 8.0e-5),
+        ("siskin", 900000004, "SISKIN", 15.16, 51.64, 0.0006, 240.0, 310.0, 6.0e-5),
         ("dunlin", 900000005, "DUNLIN", 15.05, 97.60, 0.0012, 95.0, 130.0, 3.0e-5),
     ];
 
@@ -51,30 +47,35 @@ public static class DemoScenario
     public static IReadOnlyList<(string SpacecraftId, ElementSet ElementSet)> ElementSetsFor(UtcInstant dayUtc)
     {
         double days = Math.Floor(dayUtc.SecondsSince(ReferenceUtc) / 86400);
-        return [.. Orbits.Select(orbit => (orbit.Id, new ElementSet
+        return [.. Orbits.Select(orbit =>
         {
-            CatalogNumber = orbit.CatalogNumber,
-            Name = orbit.Name,
-            EpochUtc = ReferenceUtc.AddSeconds(days * 86400),
-            MeanMotionRevPerDay = orbit.MeanMotionRevPerDay,
-            Eccentricity = orbit.Eccentricity,
-            InclinationDeg = orbit.InclinationDeg,
-            RightAscensionOfNodeDeg = Wrap(orbit.NodeDeg + (days * NodeRateDegPerDay(orbit.MeanMotionRevPerDay, orbit.InclinationDeg, orbit.Eccentricity))),
-            ArgumentOfPerigeeDeg = 90,
-            MeanAnomalyDeg = Wrap(orbit.MeanAnomalyDeg + (days * 360 * (orbit.MeanMotionRevPerDay % 1))),
-            BStarPerEarthRadius = orbit.BStar,
-        }))];
+            (double nodeDegPerDay, double perigeeDegPerDay) = RatesDegPerDay(orbit.MeanMotionRevPerDay, orbit.InclinationDeg, orbit.Eccentricity);
+            return (orbit.Id, new ElementSet
+            {
+                CatalogNumber = orbit.CatalogNumber,
+                Name = orbit.Name,
+                EpochUtc = ReferenceUtc.AddSeconds(days * 86400),
+                MeanMotionRevPerDay = orbit.MeanMotionRevPerDay,
+                Eccentricity = orbit.Eccentricity,
+                InclinationDeg = orbit.InclinationDeg,
+                RightAscensionOfNodeDeg = Wrap(orbit.NodeDeg + (days * nodeDegPerDay)),
+                ArgumentOfPerigeeDeg = Wrap(90 + (days * perigeeDegPerDay)),
+                MeanAnomalyDeg = Wrap(orbit.MeanAnomalyDeg + (days * 360 * (orbit.MeanMotionRevPerDay % 1))),
+                BStarPerEarthRadius = orbit.BStar,
+            });
+        })];
     }
 
-    /// <summary>Secular rate of the node under J2 (common practice; WGS-72 constants), degrees a day.</summary>
-    private static double NodeRateDegPerDay(double meanMotionRevPerDay, double inclinationDeg, double eccentricity)
+    /// <summary>Secular rates of the node and the perigee under J2 (common practice; WGS-72 constants), degrees a day.</summary>
+    private static (double NodeDegPerDay, double PerigeeDegPerDay) RatesDegPerDay(double meanMotionRevPerDay, double inclinationDeg, double eccentricity)
     {
-        const double ke = 0.0743669161331734;
-        double meanMotionRadPerMin = meanMotionRevPerDay * 2 * Math.PI / MinutesPerDay;
-        double semiMajorAxisKm = EarthRadiusKm * Math.Pow(ke / meanMotionRadPerMin, 2.0 / 3);
+        GravityModel gravity = GravityModel.Wgs72;
+        double motionRadPerS = meanMotionRevPerDay * 2 * Math.PI / 86400;
+        double semiMajorAxisKm = Math.Cbrt(gravity.MuKm3PerS2 / (motionRadPerS * motionRadPerS));
         double parameterKm = semiMajorAxisKm * (1 - (eccentricity * eccentricity));
-        double rateRadPerMin = -1.5 * J2 * Math.Pow(EarthRadiusKm / parameterKm, 2) * meanMotionRadPerMin * Math.Cos(double.DegreesToRadians(inclinationDeg));
-        return double.RadiansToDegrees(rateRadPerMin) * MinutesPerDay;
+        double rate = 1.5 * gravity.J2 * Math.Pow(gravity.EarthRadiusKm / parameterKm, 2) * meanMotionRevPerDay * 360;
+        double cosine = Math.Cos(double.DegreesToRadians(inclinationDeg));
+        return (-rate * cosine, rate * ((2.5 * cosine * cosine) - 0.5));
     }
 
     private static double Wrap(double angleDeg) => angleDeg - (360 * Math.Floor(angleDeg / 360));

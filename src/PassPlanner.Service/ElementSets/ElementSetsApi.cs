@@ -50,7 +50,7 @@ public static class ElementSetsApi
     /// Every set must carry the spacecraft's catalogue number, when it has one. A bad line is answered with its number,
     /// column and reason; the others are kept.
     /// </remarks>
-    private static async Task<IResult> AddToOne(
+    private static async Task<Ok<ElementSetUpload>> AddToOne(
         string id,
         HttpRequest request,
         SpacecraftProfiles profiles,
@@ -64,14 +64,14 @@ public static class ElementSetsApi
 
     /// <summary>Adds a whole file of element sets</summary>
     /// <remarks>Sets are matched to spacecraft by catalogue number.</remarks>
-    private static async Task<IResult> AddToAll(
+    private static async Task<Ok<ElementSetUpload>> AddToAll(
         HttpRequest request, ElementSetStore store, TimeProvider clock, [AsParameters] UploadParameters parameters)
     {
         ILookup<int, string> byNumber = store.SpacecraftByCatalogNumber();
         return await AddAsync(request, store, clock, number => byNumber[number]);
     }
 
-    private static async Task<IResult> AddAsync(
+    private static async Task<Ok<ElementSetUpload>> AddAsync(
         HttpRequest request, ElementSetStore store, TimeProvider clock, Func<int, IEnumerable<string>> spacecraftOf)
     {
         var query = new QueryReader(request.Query);

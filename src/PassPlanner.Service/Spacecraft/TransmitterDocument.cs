@@ -22,15 +22,15 @@ public sealed record TransmitterDocument : IRadioDocument
     [Quantity(0, 30, "dB")]
     public double? LineLossDb { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Margin that the operator's policy asks for; 3 when left out.</summary>
     [Quantity(-10, 50, "dB")]
     public double? RequiredMarginDb { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Elevation above which a pass must close throughout to count as closing; 10 when left out.</summary>
     [Quantity(0, 90, "degrees")]
     public double? MinimumElevationDeg { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Time from first closing until data flow; 0 when left out.</summary>
     [Quantity(0, 3600, "s")]
     public double? AcquisitionS { get; init; }
 
@@ -38,27 +38,27 @@ public sealed record TransmitterDocument : IRadioDocument
     [Quantity(50, 99.999, "percent")]
     public double? AvailabilityPercent { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Antenna pattern.</summary>
     [Part(Required = true)]
     public PatternDocument? Pattern { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Direction of the antenna's axis in body axes; +Z when left out.</summary>
     [Quantity(-1e6, 1e6, "", Count = 3)]
     public IReadOnlyList<double>? Boresight { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Body direction of phi = 0, made perpendicular to the boresight; +X when left out.</summary>
     [Quantity(-1e6, 1e6, "", Count = 3)]
     public IReadOnlyList<double>? Reference { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Polarisation.</summary>
     [Part(Required = true)]
     public PolarisationDocument? Polarisation { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Relative tilt that the mismatch is taken for; worst when left out.</summary>
     [Choice("worst", "mean", "best")]
     public string? PolarisationCase { get; init; }
 
-    /// <inheritdoc/>
+    /// <summary>Waveforms that the radio can use.</summary>
     [List(1, 64, Required = true)]
     public IReadOnlyList<WaveformDocument>? Waveforms { get; init; }
 }

@@ -9,6 +9,7 @@ namespace PassPlanner.Planning.Passes;
 /// AOS and LOS are solved on SGP4 itself to better than a millisecond, and no pass or gap longer than 1/4 s is lost
 /// (<see cref="CrossingFinder"/> says why). A pass that reaches out of the period is listed whole, up to a day to either side.
 /// A pass has the same edges, to the tick, whatever the period asked for.
+/// Where another element set takes over between two nodes the path jumps; there a crossing is found by the change of side alone.
 /// </summary>
 public static class PassFinder
 {

@@ -3,6 +3,7 @@ using PassPlanner.Service.Api;
 using PassPlanner.Service.Demo;
 using PassPlanner.Service.ElementSets;
 using PassPlanner.Service.Health;
+using PassPlanner.Service.Jobs;
 using PassPlanner.Service.Passes;
 using PassPlanner.Service.Problems;
 using PassPlanner.Service.Profiles;
@@ -27,6 +28,7 @@ builder.Services.AddSingleton<StationProfiles>();
 builder.Services.AddSingleton<SpacecraftProfiles>();
 builder.Services.AddSingleton<DemoLoader>();
 builder.Services.AddSingleton<ModelCache>();
+builder.Services.AddHostedService<WarmUp>();
 
 var app = builder.Build();
 app.Services.GetRequiredService<PlannerDatabase>().Migrate();

@@ -16,7 +16,9 @@ public sealed class PatternTable
     private const double MainBeamDb = 20;
 
     private readonly Grid fine;
-    private readonly Grid coarse;
+
+    /// <summary>Most antennas never point that far off, so this part waits until it is asked for.</summary>
+    private readonly Lazy<Grid> coarse;
 
     /// <summary>
     /// The table of a pattern, with the mean over jitter when there is any: in closed form for a Gaussian beam, else by
@@ -29,25 +31,19 @@ public sealed class PatternTable
     {
         RangeCheck.Within(jitterRmsRad, 0, 0.2, nameof(jitterRmsRad), "rad");
         double border = Math.Min(Math.PI, FineScales * pattern.AngularScaleRad);
-        Func<double, double> gainDbi = OverAngle(pattern);
-        fine = new Grid(gainDbi, 0, border, FineSteps);
-        coarse = new Grid(gainDbi, border, Math.PI, border < Math.PI ? CoarseSteps : 1);
+        Func<double, double> nearDbi = OverAngle(pattern);
+        Func<double, double> farDbi = nearDbi;
         if (jitterRmsRad > 0)
         {
-            var without = (fine, coarse);
-            double tableDbi(double angle) => angle < without.fine.End ? without.fine.At(angle) : without.coarse.At(angle);
-            var beam = pattern as GaussianBeamPattern;
-            gainDbi = angle => beam?.MeanGainDbi(angle, jitterRmsRad) ?? JitterQuadrature.Fine.MeanDbi(tableDbi, angle, jitterRmsRad);
-            fine = new Grid(gainDbi, 0, border, FineSteps);
-            coarse = new Grid(
-                angle => beam?.MeanGainDbi(angle, jitterRmsRad) ?? JitterQuadrature.Coarse.MeanDbi(tableDbi, angle, jitterRmsRad),
-                border,
-                Math.PI,
-                coarse.Steps);
+            var without = new PatternTable(pattern);
+            nearDbi = Mean(pattern, without, JitterQuadrature.Fine, jitterRmsRad);
+            farDbi = Mean(pattern, without, JitterQuadrature.Coarse, jitterRmsRad);
         }
 
+        fine = new Grid(nearDbi, 0, border, FineSteps);
+        coarse = new Lazy<Grid>(() => new Grid(farDbi, border, Math.PI, border < Math.PI ? CoarseSteps : 1));
         PeakGainDbi = pattern.PeakGainDbi;
-        MainBeamErrorDb = fine.ErrorAtMidpointsDb(gainDbi, GainDbi(0) - MainBeamDb);
+        MainBeamErrorDb = fine.ErrorAtMidpointsDb(nearDbi, GainDbi(0) - MainBeamDb);
     }
 
     /// <summary>Peak gain of the pattern without jitter, dBi.</summary>
@@ -63,7 +59,12 @@ public sealed class PatternTable
     /// <summary>Gain, dBi.</summary>
     /// <param name="offAxisRad">Angle from the boresight, rad, 0 to pi.</param>
     public double GainDbi(double offAxisRad) =>
-        offAxisRad < fine.End ? fine.At(offAxisRad) : coarse.At(offAxisRad);
+        offAxisRad < fine.End ? fine.At(offAxisRad) : coarse.Value.At(offAxisRad);
+
+    private static Func<double, double> Mean(AntennaPattern pattern, PatternTable without, JitterQuadrature quadrature, double jitterRmsRad) =>
+        pattern is GaussianBeamPattern beam
+            ? angle => beam.MeanGainDbi(angle, jitterRmsRad)
+            : angle => quadrature.MeanDbi(without.GainDbi, angle, jitterRmsRad);
 
     private static Func<double, double> OverAngle(AntennaPattern pattern)
     {

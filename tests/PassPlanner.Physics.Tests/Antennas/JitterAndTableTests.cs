@@ -121,7 +121,7 @@ public class JitterAndTableTests(ITestOutputHelper output)
     public void Looking_up_a_table_allocates_nothing()
     {
         var table = new PatternTable(new TaperedApertureModel(3.7, 11).At(8.2e9), 0.0005);
-        double sum = table.GainDbi(0.001);
+        double sum = table.GainDbi(0.001) + table.GainDbi(2); // each part of the table is there from its first look-up on
         long before = GC.GetAllocatedBytesForCurrentThread();
         for (int i = 0; i < 1000; i++)
         {

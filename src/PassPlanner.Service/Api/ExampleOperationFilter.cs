@@ -15,6 +15,8 @@ public sealed class ExampleOperationFilter : IOperationFilter
         { "pattern": { "kind": "taperedAperture", "diameterM": 3.7, "edgeTaperDb": 11, "efficiency": 0.62 }, "frequencyHz": 8.2e9, "angleDeg": [0, 0.3, 0.6, 1] }
         """;
 
+    private const string CutsExample = "angleDeg,gainDbi\n0,6\n30,4.5\n60,0.5\n90,-5\n180,-16\n";
+
     private const string BudgetExample = """
         {
           "frequencyHz": 2.2e9, "slantRangeKm": 1400, "powerW": 1, "lineLossDb": 0.5, "gainDbi": 6,
@@ -37,6 +39,11 @@ public sealed class ExampleOperationFilter : IOperationFilter
         if (content.TryGetValue("application/json", out IOpenApiMediaType? media) && media is OpenApiMediaType json && ExampleOf(body) is { } example)
         {
             json.Example = example;
+        }
+
+        if (content.TryGetValue("text/csv", out IOpenApiMediaType? csv) && csv is OpenApiMediaType table && context.ApiDescription.RelativePath == "api/v1/patterns/measured-cuts")
+        {
+            table.Example = JsonValue.Create(CutsExample);
         }
 
         if (content.TryGetValue("text/plain", out IOpenApiMediaType? plain) && plain is OpenApiMediaType text)

@@ -1,4 +1,7 @@
 using Microsoft.AspNetCore.Http.HttpResults;
+using Microsoft.AspNetCore.Http.Metadata;
+using Microsoft.AspNetCore.Mvc;
+using PassPlanner.Exchange.Patterns;
 using PassPlanner.Physics.Antennas;
 using PassPlanner.Physics.Links;
 using PassPlanner.Service.Passes;
@@ -10,10 +13,16 @@ namespace PassPlanner.Service.Radios;
 /// <summary>Single questions about antennas and links: the functions that the passes use, for engineers and scripts.</summary>
 public static class RadiosApi
 {
+    private const long GreatestCutsBytes = 8 * 1024 * 1024;
+    private const int MostErrors = 100;
+
     /// <summary>Maps the routes.</summary>
     public static void MapRadioQuestions(this IEndpointRouteBuilder routes)
     {
         routes.MapPost("/patterns/evaluate", EvaluatePattern).WithTags("Questions").Problems(400);
+        routes.MapPost("/patterns/measured-cuts", ReadCuts).WithTags("Questions")
+            .WithMetadata(new AcceptsMetadata(["text/csv"], typeof(string)))
+            .WithMetadata(new RequestSizeLimitAttribute(GreatestCutsBytes)).Problems(400, 413);
         routes.MapPost("/budgets", EvaluateBudget).WithTags("Questions").Problems(400);
     }
 
@@ -53,6 +62,30 @@ public static class RadiosApi
                 new ModelUse { Name = "Directivity", Edition = "4 pi over the integral of the pattern over the sphere", Note = "" },
                 new ModelUse { Name = "Effective area", Edition = "G lambda^2 / 4 pi", Note = "of the peak gain" },
             ],
+        });
+    }
+
+    /// <summary>Reads measured cuts from CSV</summary>
+    /// <remarks>
+    /// A header with angleDeg and gainDbi, and phiDeg where there are several cuts; a row for each point. Answers the pattern as
+    /// profiles take it; stores nothing.
+    /// </remarks>
+    private static async Task<Ok<PatternDocument>> ReadCuts(HttpRequest request)
+    {
+        using var body = new MemoryStream();
+        await request.Body.CopyToAsync(body, request.HttpContext.RequestAborted);
+        body.Position = 0;
+        MeasuredCutReading reading = MeasuredCutReader.Read(body);
+        if (reading.Refused.Count > 0)
+        {
+            throw RequestProblemException.InvalidInput([.. reading.Refused.Take(MostErrors).Select(r =>
+                new FieldError($"#/row/{r.Row}", $"row {r.Row}, field {r.Field}: {r.Reason}"))]);
+        }
+
+        return TypedResults.Ok(new PatternDocument
+        {
+            Kind = "measured",
+            Cuts = [.. reading.Cuts.Select(c => new CutDocument { PhiDeg = c.PhiDeg, AngleDeg = c.AngleDeg, GainDbi = c.GainDbi })],
         });
     }
 

@@ -80,6 +80,21 @@ public class QuestionsTests
     }
 
     [Fact]
+    public async Task Measured_cuts_come_back_as_a_pattern_that_profiles_take()
+    {
+        using var host = new ServiceHost();
+        using HttpResponseMessage response = await host.SendAsync(
+            HttpMethod.Post, "/api/v1/patterns/measured-cuts", "phiDeg,angleDeg,gainDbi\n0,0,6\n0,90,-5\n90,0,6\n90,90,-8\n", contentType: "text/csv");
+        JsonNode pattern = JsonNode.Parse(await response.Content.ReadAsStringAsync())!;
+        Assert.Equal(2, pattern["cuts"]!.AsArray().Count);
+        await host.PostAsync("/api/v1/spacecraft", Samples.With(Samples.Spacecraft, "/transmitters/0/pattern", pattern.ToJsonString()));
+        using HttpResponseMessage bad = await host.SendAsync(
+            HttpMethod.Post, "/api/v1/patterns/measured-cuts", "angleDeg,gainDbi\n0,6\n200,1\n", contentType: "text/csv");
+        Assert.Equal(HttpStatusCode.BadRequest, bad.StatusCode);
+        Assert.Contains("row 3, field 1", (await ServiceHost.ProblemAsync(bad))["detail"]!.GetValue<string>(), StringComparison.Ordinal);
+    }
+
+    [Fact]
     public async Task Published_waveforms_come_with_their_sources_and_own_ones_are_added()
     {
         using var host = new ServiceHost();

@@ -144,7 +144,7 @@ public static class SpacecraftMapper
         }
     }
 
-    private static RadioParts? Parts(IRadioDocument document, string pointer, FieldErrors errors)
+    private static RadioParts? Parts(RadioDocument document, string pointer, FieldErrors errors)
     {
         PatternModel? pattern = RadioMapper.Pattern(document.Pattern!, pointer + "/pattern", errors);
         if (pattern is not null)

@@ -63,6 +63,15 @@ internal sealed class FieldParser
     /// <summary>Second derivative of the mean motion as element sets print it, -1000 to 1000 rev/day^3.</summary>
     public double MeanMotionDdot(string text, Place at) => Number(text, at, "second derivative of the mean motion", -1000, 1000, "rev/day^3");
 
+    /// <summary>Ephemeris type: blank, or 0 to 3, which all are read as SGP4; 4 is for another theory, whose elements would give a wrong orbit.</summary>
+    public void CheckEphemerisType(string text, Place at)
+    {
+        if (text.Length > 0 && text is not ("0" or "1" or "2" or "3"))
+        {
+            Refuse(at, $"the ephemeris type is {Quoted(text)}; it must be blank or 0 to 3: elements of another type are not for SGP4");
+        }
+    }
+
     /// <summary>A count, 0 to 999,999,999.</summary>
     public int Count(string text, Place at, string name) => Whole(text, at, name, 0, 999_999_999);
 

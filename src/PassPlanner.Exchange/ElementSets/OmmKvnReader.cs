@@ -36,16 +36,17 @@ internal static class OmmKvnReader
             message ??= new OmmMessage(lineNumber);
             string value = line[(equals + 1)..];
             int column = equals + 2 + (value.Length - value.TrimStart().Length);
-            message.Set(keyword, WithoutUnit(value.Trim()), new Place(lineNumber, column));
+            (string bareValue, string? unit) = SplitUnit(value.Trim());
+            message.Set(keyword, bareValue, new Place(lineNumber, column), unit);
         }
 
         message?.Finish(sink);
     }
 
-    /// <summary>A value without the unit in brackets that may follow it.</summary>
-    private static string WithoutUnit(string value)
+    /// <summary>A value and the unit in brackets that may follow it.</summary>
+    private static (string Value, string? Unit) SplitUnit(string value)
     {
         int bracket = value.LastIndexOf('[');
-        return bracket > 0 && value.EndsWith(']') ? value[..bracket].TrimEnd() : value;
+        return bracket > 0 && value.EndsWith(']') ? (value[..bracket].TrimEnd(), value[(bracket + 1)..^1].Trim()) : (value, null);
     }
 }

@@ -8,15 +8,33 @@ namespace PassPlanner.Exchange.ElementSets;
 /// </summary>
 internal sealed class OmmMessage(int lineNumber)
 {
+    /// <summary>Units of the keywords that may state one (table 4-3); a message that states another is refused.</summary>
+    private static readonly Dictionary<string, string> Units = new(StringComparer.OrdinalIgnoreCase)
+    {
+        ["MEAN_MOTION"] = "rev/day",
+        ["INCLINATION"] = "deg",
+        ["RA_OF_ASC_NODE"] = "deg",
+        ["ARG_OF_PERICENTER"] = "deg",
+        ["MEAN_ANOMALY"] = "deg",
+        ["BSTAR"] = "1/ER",
+        ["MEAN_MOTION_DOT"] = "rev/day**2",
+        ["MEAN_MOTION_DDOT"] = "rev/day**3",
+    };
+
     private readonly Dictionary<string, (string Value, Place At)> keywords = new(StringComparer.OrdinalIgnoreCase);
+
+    private RefusedLine? wrongUnit;
 
     public int LineNumber { get; } = lineNumber;
 
-    public bool IsEmpty => keywords.Count == 0;
-
     /// <summary>Sets a keyword; the last of two wins. An empty value counts as absent.</summary>
-    public void Set(string keyword, string value, Place at)
+    public void Set(string keyword, string value, Place at, string? unit = null)
     {
+        if (unit is not null && Units.TryGetValue(keyword, out string? expected) && !string.Equals(unit, expected, StringComparison.OrdinalIgnoreCase))
+        {
+            wrongUnit ??= new RefusedLine(at.LineNumber, at.Column, $"the unit of {keyword} is {FieldParser.Quoted(unit)}; it must be {expected}");
+        }
+
         if (value.Length > 0)
         {
             keywords[keyword] = (value, at);
@@ -28,7 +46,7 @@ internal sealed class OmmMessage(int lineNumber)
     {
         var fields = new FieldParser();
         ElementSet set = Build(fields);
-        if (fields.Refusal is { } refusal)
+        if ((wrongUnit ?? fields.Refusal) is { } refusal)
         {
             sink.Refuse(refusal);
         }
@@ -44,6 +62,11 @@ internal sealed class OmmMessage(int lineNumber)
         Expect("REF_FRAME", fields, "TEME");
         Expect("CENTER_NAME", fields, "EARTH");
         Expect("MEAN_ELEMENT_THEORY", fields, "SGP4", "SGP/SGP4");
+        if (keywords.TryGetValue("EPHEMERIS_TYPE", out (string Value, Place At) type))
+        {
+            fields.CheckEphemerisType(type.Value, type.At);
+        }
+
         return new ElementSet
         {
             CatalogNumber = Required("NORAD_CAT_ID", fields, fields.CatalogNumber),

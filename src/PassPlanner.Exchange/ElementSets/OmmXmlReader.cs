@@ -34,6 +34,7 @@ internal static class OmmXmlReader
         var lines = (IXmlLineInfo)reader;
         OmmMessage? message = null;
         string element = "";
+        string? unit = null;
         while (reader.Read())
         {
             switch (reader.NodeType)
@@ -42,10 +43,10 @@ internal static class OmmXmlReader
                     message = new OmmMessage(lines.LineNumber);
                     break;
                 case XmlNodeType.Element:
-                    element = reader.LocalName;
+                    (element, unit) = (reader.LocalName, reader.GetAttribute("units"));
                     break;
                 case XmlNodeType.Text or XmlNodeType.CDATA:
-                    message?.Set(element, reader.Value.Trim(), new Place(lines.LineNumber, lines.LinePosition));
+                    message?.Set(element, reader.Value.Trim(), new Place(lines.LineNumber, lines.LinePosition), unit);
                     break;
                 case XmlNodeType.EndElement when reader.LocalName == "omm":
                     message?.Finish(sink);

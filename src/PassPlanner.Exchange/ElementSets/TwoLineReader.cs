@@ -129,6 +129,7 @@ internal sealed class TwoLineReader(ReadingSink sink, bool acceptBadChecksums)
             fields.Refuse(new Place(lineTwo, 3), $"the catalogue number is {FieldParser.Quoted(two[2..7])}; it must be {FieldParser.Quoted(one[2..7])} as in line 1");
         }
 
+        fields.CheckEphemerisType(one[62..63].Trim(), new Place(lineOne, 63));
         int twoDigits = Year(one[18..20], new Place(lineOne, 19), fields);
         return new ElementSet
         {

@@ -19,6 +19,7 @@ public sealed class PatternTable
 
     /// <summary>Most antennas never point that far off, so this part waits until it is asked for.</summary>
     private readonly Lazy<Grid> coarse;
+    private readonly Lazy<double> mainBeamErrorDb;
 
     /// <summary>
     /// The table of a pattern, with the mean over jitter when there is any: in closed form for a Gaussian beam, else by
@@ -43,7 +44,7 @@ public sealed class PatternTable
         fine = new Grid(nearDbi, 0, border, FineSteps);
         coarse = new Lazy<Grid>(() => new Grid(farDbi, border, Math.PI, border < Math.PI ? CoarseSteps : 1));
         PeakGainDbi = pattern.PeakGainDbi;
-        MainBeamErrorDb = fine.ErrorAtMidpointsDb(nearDbi, GainDbi(0) - MainBeamDb);
+        mainBeamErrorDb = new Lazy<double>(() => fine.ErrorAtMidpointsDb(nearDbi, GainDbi(0) - MainBeamDb));
     }
 
     /// <summary>Peak gain of the pattern without jitter, dBi.</summary>
@@ -54,7 +55,7 @@ public sealed class PatternTable
     /// the gain lies within 20 dB of the boresight's. Past the fine grid (four times the pattern's angular scale) lobes
     /// narrower than pi / 4096 are sampled, not followed.
     /// </summary>
-    public double MainBeamErrorDb { get; }
+    public double MainBeamErrorDb => mainBeamErrorDb.Value;
 
     /// <summary>Gain, dBi.</summary>
     /// <param name="offAxisRad">Angle from the boresight, rad, 0 to pi.</param>

@@ -24,17 +24,18 @@ public sealed class LinkChain
     /// <summary>Prepares a link.</summary>
     /// <param name="link">Radio, chain and antenna.</param>
     /// <param name="attitudeLaw">Attitude of the spacecraft.</param>
-    public LinkChain(Link link, AttitudeLaw attitudeLaw)
+    /// <param name="tables">Gains worked out before, shared with other links.</param>
+    public LinkChain(Link link, AttitudeLaw attitudeLaw, GainTables tables)
     {
         Link = link;
         Ladder = new WaveformLadder(link.Radio.Waveforms, link.Radio.RequiredMarginDb);
         double frequencyHz = link.Radio.FrequencyHz;
-        groundGain = new GroundGain(link.Chain.Pattern.At(frequencyHz), double.DegreesToRadians(link.Antenna.Pointing.JitterRmsDeg));
+        groundGain = tables.Ground(link.Chain.Pattern, frequencyHz, link.Antenna.Pointing.JitterRmsDeg);
         spacecraftPattern = link.Radio.Pattern.At(frequencyHz);
         attitude = attitudeLaw as ControlledAttitude;
         Attitude = attitudeLaw;
         uncontrolledGainDbi = attitudeLaw is UncontrolledAttitude uncontrolled
-            ? SphereStatistics.GainAtPercentileDbi(spacecraftPattern, uncontrolled.Percentile)
+            ? tables.AtPercentileDbi(link.Radio.Pattern, frequencyHz, uncontrolled.Percentile)
             : 0;
         backgroundK = SkyNoise.BackgroundK(frequencyHz);
         PolarisationLossDb = PolarisationMismatch.LossDb(link.Radio.Polarisation, link.Chain.Polarisation, link.Radio.PolarisationCase);

@@ -14,6 +14,7 @@ public sealed class PlanningModel
     private readonly Dictionary<string, Station> stations;
     private readonly Dictionary<string, TrackedSpacecraft> spacecraft;
     private readonly Dictionary<string, TopocentricFrame> frames;
+    private readonly GainTables tables = new();
     private readonly ConcurrentDictionary<(string Spacecraft, string Station), IReadOnlyList<LinkChain>> chains = new();
 
     /// <summary>Takes the profiles; identifiers must be unique in each list.</summary>
@@ -44,5 +45,5 @@ public sealed class PlanningModel
     /// <summary>Links between a spacecraft and a station, with their tables.</summary>
     public IReadOnlyList<LinkChain> ChainsBetween(Spacecraft craft, Station station) => chains.GetOrAdd(
         (craft.Id, station.Id),
-        _ => [.. Link.Between(craft, station).Select(link => new LinkChain(link, craft.Attitude))]);
+        _ => [.. Link.Between(craft, station).Select(link => new LinkChain(link, craft.Attitude, tables))]);
 }

@@ -173,6 +173,7 @@ public class ReaderTests(ITestOutputHelper output)
     [InlineData(1, 19, "x0", "year of the epoch")]
     [InlineData(1, 21, "367.00000000", "it must be at least 1 and below 367 in 2000")]
     [InlineData(1, 54, " 2x098-4", "drag term B*")]
+    [InlineData(1, 63, "4", "the ephemeris type is \"4\"")]
     [InlineData(2, 9, "190.0000", "inclination is 190; it must be from 0 to 180 degrees")]
     [InlineData(2, 9, "        ", "inclination is \"\"; it must be a number")]
     [InlineData(2, 18, "36O.0000", "right ascension of the node is \"36O.0000\"")]
@@ -223,6 +224,8 @@ public class ReaderTests(ITestOutputHelper output)
     [InlineData("MEAN_ELEMENT_THEORY = SGP/SGP4", "MEAN_ELEMENT_THEORY = DSST", "it must be SGP4 or SGP/SGP4")]
     [InlineData("ECCENTRICITY = 0.0005013", "ECCENTRICITY = 1.5", "eccentricity is 1.5; it must be from 0 to 1")]
     [InlineData("BSTAR = 0.0001", "COMMENT none", "BSTAR is missing")]
+    [InlineData("INCLINATION = 3.0539", "INCLINATION = 3.0539 [rad]", "the unit of INCLINATION is \"rad\"; it must be deg")]
+    [InlineData("EPHEMERIS_TYPE = 0", "EPHEMERIS_TYPE = 4", "the ephemeris type is \"4\"")]
     [InlineData("EPOCH = 2020-064T10:34:41.4264", "EPOCH = 2020-13-01T00:00:00", "the epoch is \"2020-13-01T00:00:00\"")]
     [InlineData("NORAD_CAT_ID = 23581", "NORAD_CAT_ID = 1234567890", "whole number from 1 to 999999999")]
     public void A_message_that_cannot_be_used_is_refused_with_its_reason(string what, string by, string reason)
@@ -232,6 +235,22 @@ public class ReaderTests(ITestOutputHelper output)
         ElementSetReading reading = ReadText(text.Replace(what, by, StringComparison.Ordinal) + "\n" + text);
         Assert.Contains(reason, Assert.Single(reading.Refused).Reason, StringComparison.Ordinal);
         Assert.Single(reading.Accepted);
+    }
+
+    [Fact]
+    public void An_attribute_of_XML_that_states_another_unit_is_refused()
+    {
+        string text = File.ReadAllText(ReferenceData.PathOf("orbit/omm/vanguard1.xml")).Replace("<INCLINATION>", "<INCLINATION units=\"rad\">", StringComparison.Ordinal);
+        Assert.Contains("it must be deg", Assert.Single(ReadText(text).Refused).Reason, StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData(" 0")]
+    [InlineData("00")]
+    public void A_year_may_be_padded_with_a_blank(string year)
+    {
+        ElementSet set = Assert.Single(ReadText(WithChecksum(Replaced(Line1, 19, year)) + "\n" + Line2).Accepted).ElementSet;
+        Assert.Equal(UtcInstant.FromCalendar(2000, 6, 27, 18, 50, 19.733568), set.EpochUtc);
     }
 
     [Fact]

@@ -1,6 +1,6 @@
 import type { Pass } from '../api/passes';
 import { s } from '../dom';
-import { areaPath, curveOf, highestTint, joined, linePath, runsOf, type Scale } from './ribbonGeometry';
+import { areaPath, curveOf, highestTint, joined, linePath, peakExcessDb, runsOf, type Scale } from './ribbonGeometry';
 
 /** Narrower than this a hill cannot be read and becomes a block. */
 export const narrowestHillPx = 24;
@@ -51,7 +51,7 @@ export function hillRibbon(pass: Pass, x: (timeMs: number) => number, look: Ribb
 /** A pass too narrow for a hill: a block of 1 to 4 units by its deepest tint, a dash when it does not close. */
 export function block(pass: Pass, left: number, right: number, unitPx = 3): SVGElement {
   const width = Math.max(3, right - left);
-  const tint = highestTint(pass.usableS, pass.highestMarginDb, pass.requiredMarginDb);
+  const tint = highestTint(pass.usableS, peakExcessDb(pass));
   if (tint === undefined) return s('path', { class: 'block-dash', d: `M${left} -1H${left + Math.max(5, width)}` });
   return s('rect', { class: `block m${tint}`, x: left, y: -unitPx * tint, width, height: unitPx * tint });
 }

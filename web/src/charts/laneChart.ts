@@ -4,7 +4,7 @@ import { hourMinute, dayMonth, type Zone } from '../format/time';
 import { worth } from '../format/words';
 import { hillRibbon, narrowestHillPx } from './hillRibbon';
 import { packLane, type LaneBox } from './laneLayout';
-import { highestExcessDb, lowestExcessDb } from './ribbonGeometry';
+import { highestExcessDb, lowestExcessDb, peakExcessDb } from './ribbonGeometry';
 import { lightBands } from './sunlight';
 import { fitted, textWidth } from './textWidth';
 import { timeScale, timeTicks, type TimeScale } from './timeScale';
@@ -49,6 +49,8 @@ const look = { pxPerDb: 2.3 };
 const labelPx = 12;
 const lanePaddingPx = 6;
 const hillUnderPx = 6;
+const labelHalfPx = 16;
+const flagHalfPx = 21;
 /** A longer name is cut, or a lane would stack as if its passes overlapped. */
 const widestNamePx = 132;
 
@@ -81,7 +83,8 @@ export function laneChart(input: LaneChartInput): LaneChart {
     y += layout.height;
   }
   front.append(hills, s('path', { class: 'lane-rule', d: `M0 ${y + 0.5}H${input.widthPx}` }));
-  behind.append(...timeGrid(scale, y, input));
+  const ticks = timeGrid(scale, y, input);
+  behind.append(...ticks.elements);
   element.setAttribute('height', String(y + 1));
   inside.setAttribute('height', String(y));
   element.setAttribute('viewBox', `0 0 ${input.widthPx} ${y + 1}`);
@@ -97,6 +100,7 @@ export function laneChart(input: LaneChartInput): LaneChart {
     setNow: (nowMs) => {
       const inside = nowMs >= input.fromMs && nowMs < input.toMs;
       now.setAttribute('visibility', inside ? 'visible' : 'hidden');
+      for (const { x, label } of ticks.labels) label.setAttribute('visibility', inside && Math.abs(x + labelHalfPx - scale.x(nowMs)) < labelHalfPx + flagHalfPx ? 'hidden' : 'visible');
       now.setAttribute('transform', `translate(${Math.round(scale.x(nowMs))} 0)`);
     },
   };
@@ -116,7 +120,7 @@ function boxOf(entry: LanePass, scale: TimeScale, labelled: boolean): PassBox {
   const left = scale.x(Date.parse(pass.aosUtc));
   const right = Math.max(scale.x(Date.parse(pass.losUtc)), left + 5);
   const isHill = right - left >= narrowestHillPx && pass.marginProfile !== undefined;
-  const excessDb = Math.min(highestExcessDb, pass.highestMarginDb - pass.requiredMarginDb);
+  const excessDb = Math.min(highestExcessDb, peakExcessDb(pass));
   const rise = isHill ? Math.max(2, excessDb * look.pxPerDb) : 13;
   if (!labelled) return { left, right, rise, above: rise, below: hillUnderPx, name: '', nameX: left, worthX: right, worthAnchor: 'start' };
   const timingErrorMs = pass.elementSet.isStale ? (pass.elementSet.timingErrorS ?? 0) * 1000 : 0;
@@ -173,17 +177,24 @@ function nightBands(lane: Lane, scale: TimeScale, y: number, height: number): SV
     s('rect', { class: `band-${band.light}`, x: scale.x(band.fromMs), y, width: scale.x(band.toMs) - scale.x(band.fromMs), height })));
 }
 
-function timeGrid(scale: TimeScale, bottom: number, input: LaneChartInput): SVGElement[] {
-  return timeTicks(scale, 90, input.zoneOffsetMs).flatMap((tickMs) => {
+interface TimeGrid {
+  readonly elements: readonly SVGElement[];
+  /** Names of the ticks, which give way to the flag of now. */
+  readonly labels: readonly { readonly x: number; readonly label: SVGElement }[];
+}
+
+function timeGrid(scale: TimeScale, bottom: number, input: LaneChartInput): TimeGrid {
+  const lines: SVGElement[] = [];
+  const labels: { x: number; label: SVGElement }[] = [];
+  for (const tickMs of timeTicks(scale, 90, input.zoneOffsetMs)) {
     const x = Math.round(scale.x(tickMs)) + 0.5;
+    lines.push(s('path', { class: 'grid', d: `M${x} ${headPx - 4}V${bottom}` }));
+    if (x + 40 >= scale.right) continue;
     const isMidnight = (tickMs + input.zoneOffsetMs) % 86_400_000 === 0;
-    const label = isMidnight ? dayMonth(tickMs, input.zone) : hourMinute(tickMs, input.zone);
-    const fits = x + 40 < scale.right;
-    return [
-      s('path', { class: 'grid', d: `M${x} ${headPx - 4}V${bottom}` }),
-      ...(fits ? [s('text', { class: isMidnight ? 'ink-text' : 'ink2-text', x: x + 4, y: 16 }, label)] : []),
-    ];
-  });
+    const text = isMidnight ? dayMonth(tickMs, input.zone) : hourMinute(tickMs, input.zone);
+    labels.push({ x: x + 4, label: s('text', { class: isMidnight ? 'ink-text' : 'ink2-text', x: x + 4, y: 16 }, text) });
+  }
+  return { elements: [...lines, ...labels.map(({ label }) => label)], labels };
 }
 
 interface LaneLink {

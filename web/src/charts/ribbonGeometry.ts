@@ -144,9 +144,20 @@ export function joined(runs: readonly Run[], usable: boolean): Run[] {
   return lines;
 }
 
+/**
+ * How high the hill stands: the most robust waveform's greatest margin over the required one. The pass's own highest margin
+ * is that of the best waveform at each second, which falls back at every step of the rate.
+ */
+export function peakExcessDb(pass: { readonly marginProfile?: MarginProfile | undefined; readonly highestMarginDb: number; readonly requiredMarginDb: number }): number {
+  const { marginProfile } = pass;
+  return marginProfile === undefined || marginProfile.marginDb.length === 0
+    ? pass.highestMarginDb - pass.requiredMarginDb
+    : Math.max(...marginProfile.marginDb) - marginProfile.requiredMarginDb;
+}
+
 /** The deepest tint of a pass; undefined when nothing of it is usable. */
-export function highestTint(usableS: number, highestMarginDb: number, requiredMarginDb: number): Tint | undefined {
-  return usableS > 0 ? tintOf(Math.max(0, highestMarginDb - requiredMarginDb)) : undefined;
+export function highestTint(usableS: number, excessDb: number): Tint | undefined {
+  return usableS > 0 ? tintOf(Math.max(0, excessDb)) : undefined;
 }
 
 /** Half a pixel's tenth is finer than any screen; shorter paths are quicker to draw. */

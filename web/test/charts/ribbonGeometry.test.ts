@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { areaPath, curveOf, highestTint, joined, runsOf, tintOf, type CurvePoint } from '../../src/charts/ribbonGeometry';
+import { areaPath, curveOf, highestTint, joined, peakExcessDb, runsOf, tintOf, type CurvePoint } from '../../src/charts/ribbonGeometry';
 
 const startMs = Date.UTC(2027, 2, 18, 4, 0, 0);
 const instant = (second: number) => new Date(startMs + second * 1000).toISOString();
@@ -13,8 +13,8 @@ describe('tints', () => {
   });
 
   it('are none for a pass without a usable second, however high its margin', () => {
-    expect(highestTint(0, 12, 3)).toBeUndefined();
-    expect(highestTint(60, 12, 3)).toBe(4);
+    expect(highestTint(0, 9)).toBeUndefined();
+    expect(highestTint(60, 9)).toBe(4);
   });
 });
 
@@ -77,5 +77,17 @@ describe('an area', () => {
   it('stands on the required line and is closed', () => {
     const scale = { x: (timeMs: number) => (timeMs - startMs) / 1000, y: (excessDb: number) => -excessDb };
     expect(areaPath({ tint: 1, points: [point(0, 0), point(10, 2)] }, scale)).toBe('M0 0L0 0L10 -2L10 0Z');
+  });
+});
+
+describe('the height of a hill', () => {
+  const profile = { startUtc: '2026-03-18T04:00:00Z', stepS: 10, requiredMarginDb: 3, marginDb: [-1, 17, 12], usable: [0, 1, 1] };
+
+  it('is that of the most robust waveform, not of the one in use', () => {
+    expect(peakExcessDb({ marginProfile: profile, highestMarginDb: 6, requiredMarginDb: 3 })).toBe(14);
+  });
+
+  it('follows from the highest margin where there is no profile', () => {
+    expect(peakExcessDb({ highestMarginDb: 6, requiredMarginDb: 3 })).toBe(3);
   });
 });

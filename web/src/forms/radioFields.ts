@@ -15,14 +15,15 @@ export const patternField: KindField = {
     },
     gaussianBeam: {
       label: 'Gaussian beam', make: () => ({ kind: 'gaussianBeam', gainDbi: 20, halfPowerBeamwidthDeg: 15 }),
-      fields: [gain, number('halfPowerBeamwidthDeg', 'Half-power beamwidth', '°'), number('floorDbi', 'Floor', 'dBi', { hint: '30 dB below the peak when left out' })],
+      fields: [gain, number('halfPowerBeamwidthDeg', 'Half-power beamwidth', '°'), number('floorDbi', 'Floor', 'dBi', { hint: '30 dB below the peak when left out' }), number('ohmicEfficiency', 'Ohmic efficiency', '', { hint: 'when gain or width is left out' })],
     },
     taperedAperture: {
       label: 'Tapered aperture', make: () => ({ kind: 'taperedAperture', diameterM: 3, edgeTaperDb: 11, efficiency: 0.6 }),
       fields: [
-        number('diameterM', 'Diameter', 'm'), number('edgeTaperDb', 'Edge taper', 'dB'),
+        number('diameterM', 'Diameter', 'm'), number('edgeTaperDb', 'Edge taper', 'dB', { hint: '11 when left out' }),
         number('halfPowerBeamwidthDeg', 'Half-power beamwidth', '°', { hint: 'instead of the edge taper' }),
-        number('taperExponent', 'Taper exponent', '', { hint: '1 or 2; 2 when left out' }), number('efficiency', 'Aperture efficiency', '', { hint: 'the taper\u2019s own when left out' }),
+        megahertz('halfPowerBeamwidthFrequencyHz', 'Width measured at'),
+        number('pedestalExponent', 'Exponent of the taper', '', { hint: '1 or 2; 1 when left out' }), number('efficiency', 'Aperture efficiency', '', { hint: 'what taper and blockage leave when left out' }),
         number('ohmicEfficiency', 'Ohmic efficiency', '', { hint: '1 when left out' }), number('blockageDiameterM', 'Blockage diameter', 'm', { hint: '0 when left out' }),
         number('surfaceErrorRmsMm', 'Surface error, rms', 'mm', { hint: '0 when left out' }),
       ],

@@ -65,7 +65,7 @@ export const stationFields: readonly Field[] = [
   },
   { type: 'flag', key: 'maskIsApparent', label: 'The mask is as seen through the air, not geometric' },
   {
-    type: 'group', key: 'climate', label: 'Radio climate', hint: 'from the grids when left out', make: () => ({}),
+    type: 'group', key: 'climate', label: 'Radio climate', hint: 'kept for the weather models', make: () => ({}),
     fields: [
       number('rainRate001MmPerH', 'Rain rate at 0.01 % of the year', 'mm/h'), number('rainHeightKm', 'Rain height', 'km'), number('surfaceTemperatureK', 'Surface temperature', 'K'),
       number('surfacePressureHpa', 'Surface pressure', 'hPa'), number('surfaceVapourDensityGPerM3', 'Surface vapour density', 'g/m³'), number('columnarVapourKgPerM2', 'Columnar vapour', 'kg/m²'),

@@ -57,9 +57,10 @@ describe('the headline', () => {
   });
 
   it('names the period by the clock once the frame has been moved', () => {
-    expect(periodWords(startMs, startMs + 4 * hourMs, startMs, 4, true, 'utc')).toBe('in the next 4\u00a0h');
-    expect(periodWords(startMs, startMs + 4 * hourMs, startMs, 4, false, 'utc')).toBe('between 04:12 and 08:12');
-    expect(periodWords(startMs + 18 * hourMs, startMs + 22 * hourMs, startMs, 4, false, 'utc')).toBe('between 22:12 and 19 Mar 02:12');
+    expect(periodWords(startMs, startMs + 4 * hourMs, startMs, true, 'utc')).toBe('before 08:12');
+    expect(periodWords(startMs, startMs + 24 * hourMs, startMs, true, 'utc')).toBe('before 19 Mar 04:12');
+    expect(periodWords(startMs, startMs + 4 * hourMs, startMs, false, 'utc')).toBe('between 04:12 and 08:12');
+    expect(periodWords(startMs + 18 * hourMs, startMs + 22 * hourMs, startMs, false, 'utc')).toBe('between 22:12 and 19 Mar 02:12');
   });
 });
 

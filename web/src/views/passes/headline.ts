@@ -5,9 +5,9 @@ import { countdown, dayAndTime, duration, hourMinute, sameDay, wait, type Zone }
 import { count } from '../../format/words';
 import type { PassGroup } from './passGroups';
 
-/** The period in the headline's words. */
-export function periodWords(fromMs: number, toMs: number, nowMs: number, periodH: number, follows: boolean, zone: Zone): string {
-  if (follows) return periodH === 168 ? 'in the next 7 days' : `in the next ${periodH}\u00a0h`;
+/** The period in the headline's words: from now on it has an end only. */
+export function periodWords(fromMs: number, toMs: number, nowMs: number, follows: boolean, zone: Zone): string {
+  if (follows) return `before ${sameDay(toMs, nowMs, zone) ? hourMinute(toMs, zone) : dayAndTime(toMs, zone)}`;
   const from = sameDay(fromMs, nowMs, zone) ? hourMinute(fromMs, zone) : dayAndTime(fromMs, zone);
   const to = sameDay(toMs, fromMs, zone) ? hourMinute(toMs, zone) : dayAndTime(toMs, zone);
   return `between ${from} and ${to}`;

@@ -162,7 +162,7 @@ class PassesPage {
     const groups = groupPasses(selected);
     const framed = groups.filter((group) => group.losMs > Math.max(fromMs, this.frameFromMs === undefined ? nowMs() : 0) && group.aosMs < toMs);
     const input: ControlInput = { selection: this.selection, stations: feed.stations, spacecraft: feed.spacecraft, isPhone: false, onChange: this.change };
-    const period = periodWords(fromMs, toMs, nowMs(), this.selection.periodH, this.frameFromMs === undefined, zone());
+    const period = periodWords(fromMs, toMs, nowMs(), this.frameFromMs === undefined, zone());
     return [
       h('h1', {}, headline(framed, period)),
       this.nextLine(groups),

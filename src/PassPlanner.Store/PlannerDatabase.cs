@@ -9,6 +9,7 @@ namespace PassPlanner.Store;
 public sealed class PlannerDatabase
 {
     private const string ReadVersionSql = "SELECT version FROM content_version WHERE id = 1";
+    private const string CountChangesSql = "SELECT total_changes()";
     private const string RaiseVersionSql = "UPDATE content_version SET version = version + 1 WHERE id = 1";
 
     private readonly string connectionString;
@@ -83,8 +84,13 @@ public sealed class PlannerDatabase
     {
         using SqliteConnection connection = Open();
         using SqliteTransaction transaction = connection.BeginTransaction(deferred: false);
+        long changesBefore = connection.ExecuteScalar<long>(CountChangesSql, transaction: transaction);
         T outcome = work(connection, transaction);
-        connection.Execute(RaiseVersionSql, transaction: transaction);
+        if (connection.ExecuteScalar<long>(CountChangesSql, transaction: transaction) != changesBefore)
+        {
+            connection.Execute(RaiseVersionSql, transaction: transaction);
+        }
+
         transaction.Commit();
         return outcome;
     }

@@ -37,7 +37,7 @@ public sealed class BrowserFixture : IAsyncLifetime
         }
 
         playwright?.Dispose();
-        await demo.DisposeAsync();
+        demo.Dispose();
     }
 
     /// <summary>A new page of a service; what it writes to the console as an error is kept.</summary>

@@ -155,6 +155,28 @@ public partial class PagesTests(BrowserFixture browser)
     }
 
     [Fact]
+    public async Task A_need_whose_kind_is_changed_is_saved()
+    {
+        using var service = new LiveService();
+        await using Tab tab = await browser.OpenAsync(service, "/spacecraft/lark-2");
+        await tab.Page.GetByLabel("Kind of need").SelectOptionAsync("longestGap");
+        await tab.Page.GetByRole(AriaRole.Button, new PageGetByRoleOptions { NameRegex = new Regex("^Save revision") }).ClickAsync();
+        await Assertions.Expect(tab.Page.GetByText(new Regex("Revision 2")).First).ToBeVisibleAsync();
+        JsonNode need = Assert.Single((await JsonAsync(service, "/api/v1/spacecraft/lark-2"))["needs"]!.AsArray())!;
+        Assert.Equal("longestGap", need["kind"]!.GetValue<string>());
+        Assert.Null(need["bytes"]);
+    }
+
+    [Fact]
+    public async Task A_page_of_a_pass_is_found_by_an_instant_with_a_fraction()
+    {
+        using var service = new LiveService();
+        string path = (await FirstPassAsync(service)).Replace("Z?", ".250Z?", StringComparison.Ordinal);
+        await using Tab tab = await browser.OpenAsync(service, path);
+        await Assertions.Expect(tab.Headline).ToContainTextAsync("Closes");
+    }
+
+    [Fact]
     public async Task Element_sets_are_pasted_and_what_was_understood_is_shown()
     {
         using var service = new LiveService();

@@ -126,7 +126,7 @@ public class ProfileStoreTests
     }
 
     [Fact]
-    public void The_version_of_the_content_rises_with_writes_and_not_with_reads()
+    public void The_version_of_the_content_rises_with_writes_and_with_nothing_else()
     {
         using var temporary = new TemporaryDatabase();
         var store = new ProfileStore(temporary.Database, ProfileKind.Station);
@@ -136,6 +136,8 @@ public class ProfileStoreTests
         Assert.True(after > before);
         store.List();
         store.Find("a");
+        store.Delete("nobody", null, false);
+        store.Create("a", Second, 0, false, Monday);
         Assert.Equal(after, temporary.Database.ContentVersion());
     }
 }

@@ -51,7 +51,10 @@ internal sealed class FieldParser
     public double Angle(string text, Place at, string name)
     {
         double value = Number(text, at, name, -360, 360, "degrees");
-        return value is >= 0 and < 360 ? value : value - (360 * Math.Floor(value / 360));
+        double turned = value - (360 * Math.Floor(value / 360));
+
+        // A tiny negative angle comes to 360 by rounding.
+        return turned < 360 ? turned : 0;
     }
 
     /// <summary>Drag term B*, -100 to 100 per Earth radius.</summary>
@@ -71,6 +74,26 @@ internal sealed class FieldParser
             Refuse(at, $"the ephemeris type is {Quoted(text)}; it must be blank or 0 to 3: elements of another type are not for SGP4");
         }
     }
+
+    /// <summary>Classification: one letter, U when blank.</summary>
+    public char Classification(string text, Place at)
+    {
+        string letter = text.Trim(' ');
+        if (letter.Length == 0)
+        {
+            return 'U';
+        }
+
+        if (letter.Length > 1 || !char.IsAsciiLetter(letter[0]))
+        {
+            Refuse(at, $"the classification is {Quoted(letter)}; it must be one letter: U, C or S");
+        }
+
+        return letter[0];
+    }
+
+    /// <summary>A name or a designator without control characters.</summary>
+    public static string Printable(string text) => new([.. text.Where(c => !char.IsControl(c))]);
 
     /// <summary>A count, 0 to 999,999,999.</summary>
     public int Count(string text, Place at, string name) => Whole(text, at, name, 0, 999_999_999);

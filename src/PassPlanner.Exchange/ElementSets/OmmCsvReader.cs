@@ -56,7 +56,7 @@ internal static class OmmCsvReader
             message.Set(header[i].Trim(), fields[i].Trim(), new Place(lineNumber, i + 1));
         }
 
-        message.Finish(sink);
+        message.Finish(sink, needsMetadata: false);
     }
 
     /// <summary>The fields of one row; nothing when it is not CSV. Rows are read one by one so that a bad one does not take the rest with it.</summary>

@@ -37,14 +37,14 @@ internal static class OmmJsonReader
                     reader.Skip();
                     break;
                 case JsonTokenType.PropertyName:
-                    keyword = reader.GetString()!;
+                    keyword = TextOf(ref reader, at, sink);
                     break;
                 case JsonTokenType.String or JsonTokenType.Number when message is not null:
-                    string value = reader.TokenType == JsonTokenType.String ? reader.GetString()! : Encoding.UTF8.GetString(reader.ValueSpan);
+                    string value = reader.TokenType == JsonTokenType.String ? TextOf(ref reader, at, sink) : Encoding.UTF8.GetString(reader.ValueSpan);
                     message.Set(keyword, value.Trim(), at);
                     break;
                 case JsonTokenType.EndObject:
-                    message?.Finish(sink);
+                    message?.Finish(sink, needsMetadata: false);
                     message = null;
                     break;
                 case JsonTokenType.StartArray or JsonTokenType.EndArray or JsonTokenType.Null or JsonTokenType.True or JsonTokenType.False when message is not null || reader.CurrentDepth == 0:
@@ -55,6 +55,20 @@ internal static class OmmJsonReader
                     sink.Refuse(at.LineNumber, at.Column, "a list of element sets holds objects, not values");
                     break;
             }
+        }
+    }
+
+    /// <summary>A text; empty, and refused, when it has an escape that stands for no character.</summary>
+    private static string TextOf(ref Utf8JsonReader reader, Place at, ReadingSink sink)
+    {
+        try
+        {
+            return reader.GetString()!;
+        }
+        catch (InvalidOperationException)
+        {
+            sink.Refuse(at.LineNumber, at.Column, "the text has an escape that stands for no character");
+            return "";
         }
     }
 }

@@ -29,7 +29,7 @@ internal static class OmmKvnReader
             string keyword = line[..equals].Trim();
             if (keyword == FirstKeyword)
             {
-                message?.Finish(sink);
+                message?.Finish(sink, needsMetadata: true);
                 message = new OmmMessage(lineNumber);
             }
 
@@ -40,7 +40,7 @@ internal static class OmmKvnReader
             message.Set(keyword, bareValue, new Place(lineNumber, column), unit);
         }
 
-        message?.Finish(sink);
+        message?.Finish(sink, needsMetadata: true);
     }
 
     /// <summary>A value and the unit in brackets that may follow it.</summary>

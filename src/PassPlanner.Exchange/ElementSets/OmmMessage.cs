@@ -42,10 +42,12 @@ internal sealed class OmmMessage(int lineNumber)
     }
 
     /// <summary>Hands the element set on, or the first thing that is wrong with it.</summary>
-    public void Finish(ReadingSink sink)
+    /// <param name="sink">Where to.</param>
+    /// <param name="needsMetadata">Whether the message must say its frame, time system and theory, as the standard asks of KVN and XML.</param>
+    public void Finish(ReadingSink sink, bool needsMetadata)
     {
         var fields = new FieldParser();
-        ElementSet set = Build(fields);
+        ElementSet set = Build(fields, needsMetadata);
         if ((wrongUnit ?? fields.Refusal) is { } refusal)
         {
             sink.Refuse(refusal);
@@ -56,12 +58,12 @@ internal sealed class OmmMessage(int lineNumber)
         }
     }
 
-    private ElementSet Build(FieldParser fields)
+    private ElementSet Build(FieldParser fields, bool needsMetadata)
     {
-        Expect("TIME_SYSTEM", fields, "UTC");
-        Expect("REF_FRAME", fields, "TEME");
-        Expect("CENTER_NAME", fields, "EARTH");
-        Expect("MEAN_ELEMENT_THEORY", fields, "SGP4", "SGP/SGP4");
+        Expect("TIME_SYSTEM", fields, needsMetadata, "UTC");
+        Expect("REF_FRAME", fields, needsMetadata, "TEME");
+        Expect("CENTER_NAME", fields, needsMetadata, "EARTH");
+        Expect("MEAN_ELEMENT_THEORY", fields, needsMetadata, "SGP4", "SGP/SGP4");
         if (keywords.TryGetValue("EPHEMERIS_TYPE", out (string Value, Place At) type))
         {
             fields.CheckEphemerisType(type.Value, type.At);
@@ -72,7 +74,7 @@ internal sealed class OmmMessage(int lineNumber)
             CatalogNumber = Required("NORAD_CAT_ID", fields, fields.CatalogNumber),
             Name = Text("OBJECT_NAME"),
             InternationalDesignator = Text("OBJECT_ID"),
-            Classification = Text("CLASSIFICATION_TYPE") is { Length: > 0 } classification ? classification[0] : 'U',
+            Classification = keywords.TryGetValue("CLASSIFICATION_TYPE", out (string Value, Place At) letter) ? fields.Classification(letter.Value, letter.At) : 'U',
             EpochUtc = Required("EPOCH", fields, fields.Epoch),
             MeanMotionRevPerDay = Required("MEAN_MOTION", fields, fields.MeanMotion),
             Eccentricity = Required("ECCENTRICITY", fields, fields.Eccentricity),
@@ -88,7 +90,7 @@ internal sealed class OmmMessage(int lineNumber)
         };
     }
 
-    private string Text(string keyword) => keywords.TryGetValue(keyword, out (string Value, Place At) found) ? found.Value : "";
+    private string Text(string keyword) => keywords.TryGetValue(keyword, out (string Value, Place At) found) ? FieldParser.Printable(found.Value) : "";
 
     private T? Optional<T>(string keyword, Func<string, Place, T> parse) =>
         keywords.TryGetValue(keyword, out (string Value, Place At) found) ? parse(found.Value, found.At) : default;
@@ -104,9 +106,16 @@ internal sealed class OmmMessage(int lineNumber)
         return default;
     }
 
-    private void Expect(string keyword, FieldParser fields, params string[] allowed)
+    private void Expect(string keyword, FieldParser fields, bool isNeeded, params string[] allowed)
     {
-        if (keywords.TryGetValue(keyword, out (string Value, Place At) found) && !allowed.Contains(found.Value, StringComparer.OrdinalIgnoreCase))
+        if (!keywords.TryGetValue(keyword, out (string Value, Place At) found))
+        {
+            if (isNeeded)
+            {
+                fields.Refuse(new Place(LineNumber, 1), $"{keyword} is missing from the message that begins here; it must be {string.Join(" or ", allowed)}");
+            }
+        }
+        else if (!allowed.Contains(found.Value, StringComparer.OrdinalIgnoreCase))
         {
             fields.Refuse(found.At, $"{keyword} is {FieldParser.Quoted(found.Value)}; it must be {string.Join(" or ", allowed)}");
         }

@@ -33,6 +33,7 @@ internal static class OmmXmlReader
     {
         var lines = (IXmlLineInfo)reader;
         OmmMessage? message = null;
+        bool found = false;
         string element = "";
         string? unit = null;
         while (reader.Read())
@@ -49,7 +50,8 @@ internal static class OmmXmlReader
                     message?.Set(element, reader.Value.Trim(), new Place(lines.LineNumber, lines.LinePosition), unit);
                     break;
                 case XmlNodeType.EndElement when reader.LocalName == "omm":
-                    message?.Finish(sink);
+                    message?.Finish(sink, needsMetadata: true);
+                    found = true;
                     message = null;
                     break;
                 case XmlNodeType.EndElement:
@@ -58,6 +60,11 @@ internal static class OmmXmlReader
                 default:
                     break;
             }
+        }
+
+        if (!found)
+        {
+            sink.Refuse(1, 1, "there is no omm element in the text");
         }
     }
 

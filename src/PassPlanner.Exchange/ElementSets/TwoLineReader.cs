@@ -135,7 +135,7 @@ internal sealed class TwoLineReader(ReadingSink sink, bool acceptBadChecksums)
         {
             CatalogNumber = catalogNumber,
             Name = name is { } named ? NameOf(named.Text) : "",
-            Classification = one[7] == ' ' ? 'U' : one[7],
+            Classification = fields.Classification(one[7..8], new Place(lineOne, 8)),
             InternationalDesignator = Designator(one[9..17]),
             EpochUtc = fields.Epoch(twoDigits < FirstYear ? 2000 + twoDigits : 1900 + twoDigits, Filled(one[20..32]), new Place(lineOne, 21)),
             MeanMotionDotRevPerDay2 = fields.MeanMotionDot(Blank(one[33..43]), new Place(lineOne, 34)),
@@ -173,7 +173,7 @@ internal sealed class TwoLineReader(ReadingSink sink, bool acceptBadChecksums)
     }
 
     /// <summary>A name without the "0 " that some sources put before it.</summary>
-    private static string NameOf(string line) => (line.StartsWith("0 ", StringComparison.Ordinal) ? line[2..] : line).Trim();
+    private static string NameOf(string line) => FieldParser.Printable(line.StartsWith("0 ", StringComparison.Ordinal) ? line[2..] : line).Trim();
 
     /// <summary>1998-067A from "98067A  "; a designator in another form as it stands, empty when blank.</summary>
     private static string Designator(string field)
@@ -181,7 +181,7 @@ internal sealed class TwoLineReader(ReadingSink sink, bool acceptBadChecksums)
         string text = field.Trim();
         return text.Length is >= 6 and <= 8 && text[..5].All(char.IsAsciiDigit)
             ? $"{(string.CompareOrdinal(text[..2], "57") < 0 ? "20" : "19")}{text[..2]}-{text[2..]}"
-            : text;
+            : FieldParser.Printable(text);
     }
 
     private static string Filled(string field) => field.Replace(' ', '0');

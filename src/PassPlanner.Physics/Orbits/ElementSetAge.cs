@@ -79,6 +79,16 @@ public static class ElementSetAge
     /// <param name="elements">The set.</param>
     public static double LimitHours(ElementSet elements) => LimitHours(ClassOf(elements));
 
+    /// <summary>Standard deviation of the time of every event of a pass, s: the along-track error over the mean orbital speed.</summary>
+    /// <param name="elements">Element set.</param>
+    /// <param name="ageDays">Age, days; of any sign.</param>
+    public static double TimingSigmaS(ElementSet elements, double ageDays)
+    {
+        double motionRadPerS = elements.MeanMotionRevPerDay * 2.0 * Math.PI / 86400.0;
+        double speedKmPerS = Math.Cbrt(GravityModel.Wgs72.MuKm3PerS2 * motionRadPerS);
+        return AlongTrackSigmaKm(ClassOf(elements), Math.Abs(ageDays)) / speedKmPerS;
+    }
+
     /// <summary>Age of a set at an instant, h; negative before its epoch.</summary>
     /// <param name="elements">The set.</param>
     /// <param name="instant">Instant, UTC.</param>

@@ -12,6 +12,9 @@ public sealed record ElementSetUse
     /// <summary>Age past which a result is marked, hours; it depends on the orbit.</summary>
     public required double LimitH { get; init; }
 
+    /// <summary>Expected error of every instant of the pass at that age, one standard deviation, s.</summary>
+    public required double TimingErrorS { get; init; }
+
     /// <summary>Whether the age is past the limit.</summary>
     public required bool IsStale { get; init; }
 }

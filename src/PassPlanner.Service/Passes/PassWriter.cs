@@ -38,6 +38,7 @@ public static class PassWriter
             EpochUtc = predicted.ElementSet.EpochUtc.ToString(),
             AgeH = Math.Round(ageH, 3),
             LimitH = Math.Round(limitH, 1),
+            TimingErrorS = Math.Round(ElementSetAge.TimingSigmaS(predicted.ElementSet, ageH / 24), 2),
             IsStale = Math.Abs(ageH) > limitH,
         };
     }

@@ -21,7 +21,7 @@ public static class Dashboard
 
     /// <summary>Answers every page that the front end routes itself with the first page.</summary>
     public static void MapDashboardPages(this WebApplication app) => app.MapGet(
-        "{*path:nonfile:regex(^(?!api|openapi|health).*$)}",
+        "{*path:regex(^(?:pass/.*|(?!api|openapi|health)[^.]*)$)}",
         (HttpContext context) =>
         {
             IFileInfo index = app.Environment.WebRootFileProvider.GetFileInfo("index.html");

@@ -261,6 +261,43 @@ public class ReaderTests(ITestOutputHelper output)
     }
 
     [Fact]
+    public void An_escape_that_is_no_character_loses_its_own_message_alone()
+    {
+        string good = File.ReadAllText(ReferenceData.PathOf("orbit/omm/vanguard1.json")).Trim().TrimStart('[').TrimEnd(']');
+        string bad = good.Replace("\"2025-02-14", "\"\\ud8002025-02-14", StringComparison.Ordinal);
+        ElementSetReading reading = ReadText($"[{bad},{good}]");
+        Assert.Contains(reading.Refused, r => r.Reason.Contains("an escape that stands for no character", StringComparison.Ordinal));
+        Assert.Single(reading.Accepted);
+    }
+
+    [Fact]
+    public void A_classification_that_is_no_letter_is_refused()
+    {
+        RefusedLine refused = Assert.Single(ReadText(WithChecksum(Replaced(Line1, 8, "\0")) + "\n" + Line2).Refused);
+        Assert.Equal((1, 8), (refused.LineNumber, refused.Column));
+    }
+
+    [Fact]
+    public void A_tiny_negative_angle_is_zero_not_a_whole_turn()
+    {
+        string text = File.ReadAllText(ReferenceData.PathOf("orbit/omm/ccsds-502-annex-g7.kvn")).Replace("MEAN_ANOMALY = 150.1602", "MEAN_ANOMALY = -1e-20", StringComparison.Ordinal);
+        Assert.Equal(0, Assert.Single(ReadText(text).Accepted).ElementSet.MeanAnomalyDeg);
+    }
+
+    [Theory]
+    [InlineData("TIME_SYSTEM = UTC")]
+    [InlineData("REF_FRAME = TEME")]
+    [InlineData("MEAN_ELEMENT_THEORY = SGP/SGP4")]
+    public void A_message_in_KVN_must_say_what_the_standard_asks(string line)
+    {
+        string text = File.ReadAllText(ReferenceData.PathOf("orbit/omm/ccsds-502-annex-g7.kvn")).Replace(line, "COMMENT", StringComparison.Ordinal);
+        Assert.Contains("is missing", Assert.Single(ReadText(text).Refused).Reason, StringComparison.Ordinal);
+    }
+
+    [Fact]
+    public void XML_without_a_message_says_so() => Assert.Contains("no omm element", Assert.Single(ReadText("<a/>").Refused).Reason, StringComparison.Ordinal);
+
+    [Fact]
     public void A_document_type_is_not_followed()
     {
         ElementSetReading reading = ReadText("<?xml version=\"1.0\"?>\n<!DOCTYPE omm [<!ENTITY a \"aaaa\">]>\n<omm><NORAD_CAT_ID>&a;</NORAD_CAT_ID></omm>");

@@ -15,8 +15,8 @@ export interface TimeWindow {
 }
 
 export type CauseKind =
-  | 'none' | 'range' | 'spacecraftAntenna' | 'groundAntenna' | 'pointing'
-  | 'atmosphere' | 'polarisation' | 'noise' | 'acquisition' | 'short';
+  | 'none' | 'range' | 'spacecraftAntenna' | 'pointing'
+  | 'atmosphere' | 'polarisation' | 'noise' | 'acquisition' | 'power';
 
 export interface Cause {
   readonly kind: CauseKind;

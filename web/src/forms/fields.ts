@@ -42,6 +42,8 @@ export interface KindField extends Named {
   readonly type: 'kind';
   readonly kinds: Readonly<Record<string, { readonly label: string; readonly fields: readonly Field[]; readonly make: () => JsonObject }>>;
   readonly optional: boolean;
+  /** The kind is that of the object in which the field stands, not of a member of its own. */
+  readonly ofOwner?: true;
 }
 
 export interface ListField extends Named {

@@ -206,7 +206,7 @@ function groupPart(field: GroupField, parent: Slot, context: FormContext): HTMLE
 }
 
 function kindPart(field: KindField, parent: Slot, context: FormContext): HTMLElement {
-  const slot = memberSlot(parent, field.key);
+  const slot = field.ofOwner === true ? parent : memberSlot(parent, field.key);
   const body = h('div', { class: 'fields' });
   const select = h('select', { class: 'button small-button', 'aria-label': `Kind of ${field.label.toLowerCase()}` },
     field.optional && h('option', { value: '' }, 'left out'), Object.entries(field.kinds).map(([kind, { label }]) => h('option', { value: kind }, label)));
@@ -219,7 +219,8 @@ function kindPart(field: KindField, parent: Slot, context: FormContext): HTMLEle
   };
   select.addEventListener('change', () => {
     const chosen = field.kinds[select.value];
-    setMember(parent, field.key, chosen?.make());
+    if (field.ofOwner !== true) setMember(parent, field.key, chosen?.make());
+    else if (chosen !== undefined) slot.set(chosen.make());
     draw();
   });
   draw();

@@ -14,7 +14,7 @@ const attitudeField: KindField = {
     },
     uncontrolled: {
       label: 'Uncontrolled', make: () => ({ kind: 'uncontrolled', percentile: 10 }),
-      fields: [number('percentile', 'Percentile of the gain over the sphere', '%', { hint: '10 when left out: this share of directions has less' })],
+      fields: [number('percentile', 'Percentile of the gain over the sphere', '%', { hint: 'above 0, below 100; this share of directions has less; 10 when left out' })],
     },
   },
 };
@@ -68,10 +68,14 @@ export const spacecraftFields: readonly Field[] = [
   },
   {
     type: 'list', key: 'needs', label: 'Needs', one: 'need', make: () => ({ kind: 'contactsPerDay', count: 2 }),
-    fields: [
-      { type: 'choice', key: 'kind', label: 'Kind', options: { contactsPerDay: 'contacts a day', bytesPerDay: 'bytes a day', longestGap: 'longest gap' } },
-      number('count', 'Contacts a day', ''), number('bytes', 'Bytes a day', 'GB', { factor: 1e9 }), number('hours', 'Longest gap', 'h'),
-    ],
+    fields: [{
+      type: 'kind', key: 'kind', label: 'Need', optional: false, ofOwner: true,
+      kinds: {
+        contactsPerDay: { label: 'Contacts a day', fields: [number('count', 'Contacts a day', '')], make: () => ({ kind: 'contactsPerDay', count: 2 }) },
+        bytesPerDay: { label: 'Bytes a day', fields: [number('bytes', 'Bytes a day', 'GB', { factor: 1e9 })], make: () => ({ kind: 'bytesPerDay', bytes: 1e9 }) },
+        longestGap: { label: 'Longest gap', fields: [number('hours', 'Longest gap', 'h')], make: () => ({ kind: 'longestGap', hours: 12 }) },
+      },
+    }],
   },
 ];
 

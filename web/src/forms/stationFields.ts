@@ -80,7 +80,7 @@ export const stationFields: readonly Field[] = [
       mountField,
       {
         type: 'group', key: 'pointing', label: 'Pointing', make: () => ({}), hint: 'perfect when left out',
-        fields: [number('biasDeg', 'Bias', '°'), number('jitterRmsDeg', 'Jitter, rms', '°'), number('updateIntervalS', 'Update interval', 's')],
+        fields: [number('biasDeg', 'Bias', '°'), number('jitterRmsDeg', 'Jitter, rms', '°', { hint: 'up to 11' }), number('updateIntervalS', 'Update interval', 's')],
       },
       {
         type: 'list', key: 'receive', label: 'Receive chains', one: 'receive chain', make: makeReceive,

@@ -140,7 +140,7 @@ export function passItem(served: Served, profileStepS: number | undefined, nowMs
     aosAzimuthDeg: seconds[0]?.azimuthDeg ?? 0, losAzimuthDeg: seconds.at(-1)?.azimuthDeg ?? 0,
     verdict, requiredMarginDb, highestMarginDb: highest, lowestMarginDb: Math.min(...margins),
     limitingCause: verdict === 'closes' ? '' : verdict === 'closesInPart' ? `Range, −${Math.abs(change).toFixed(1)} dB, below ${(firstUsable?.elevationDeg ?? 0).toFixed(0)}°` : `Best second is ${(requiredMarginDb - highest).toFixed(1)} dB short`,
-    cause: verdict === 'doesNotClose' ? { kind: 'short', shortByDb: requiredMarginDb - highest } : verdict === 'closes' ? { kind: 'none' } : { kind: 'range', changeDb: change },
+    cause: verdict === 'doesNotClose' ? { kind: 'power', shortByDb: requiredMarginDb - highest } : verdict === 'closes' ? { kind: 'none' } : { kind: 'range', changeDb: change },
     usableWindows: windows, usableS, yieldBytes: bits / 8, highestBitRateBps: Math.max(0, ...rates),
     ...(firstUsable === undefined || lastUsable === undefined ? {} : { usableElevationFromDeg: firstUsable.elevationDeg, usableElevationToDeg: lastUsable.elevationDeg }),
     elementSet: { epochUtc: iso(nowMs - ageH * 3_600_000), ageH, limitH: 72, isStale: spacecraft.isStale, ...(spacecraft.isStale ? { timingErrorS: 25 } : {}) },

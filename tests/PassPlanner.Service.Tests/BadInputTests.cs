@@ -11,6 +11,8 @@ public class BadInputTests
         { "/colour", "\"red\"", "#/colour", "\"colour\" is not a member of the body" },
         { "/name", null, "#/name", "name is missing" },
         { "/name", "\"  \"", "#/name", "name is blank; it must have 1 to 120 characters" },
+        { "/name", "\"a\\u202eb\"", "#/name", "turns the direction of writing" },
+        { "/name", "\"a\\u0007b\"", "#/name", "name has a control character" },
         { "/name", "7", "#/name", "name is 7; it must be a text" },
         { "/position", null, "#/position", "position is missing" },
         { "/position/latitudeDeg", null, "#/position/latitudeDeg", "latitudeDeg is missing; it must be from -90 to 90 degrees" },

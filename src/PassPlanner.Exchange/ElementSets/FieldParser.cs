@@ -92,8 +92,9 @@ internal sealed class FieldParser
         return letter[0];
     }
 
-    /// <summary>A name or a designator without control characters.</summary>
-    public static string Printable(string text) => new([.. text.Where(c => !char.IsControl(c))]);
+    /// <summary>A name or a designator without control and format characters.</summary>
+    public static string Printable(string text) =>
+        new([.. text.Where(c => char.GetUnicodeCategory(c) is not (UnicodeCategory.Control or UnicodeCategory.Format))]);
 
     /// <summary>A count, 0 to 999,999,999.</summary>
     public int Count(string text, Place at, string name) => Whole(text, at, name, 0, 999_999_999);

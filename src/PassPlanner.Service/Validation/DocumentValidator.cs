@@ -124,11 +124,14 @@ public static class DocumentValidator
         {
             errors.Add(pointer, $"{name} has {value.Length} characters; it must have 1 to {label.MaximumLength}");
         }
-        else if (value.Any(char.IsControl))
+        else if (value.Any(IsInvisible))
         {
-            errors.Add(pointer, $"{name} has a control character; it must have none");
+            errors.Add(pointer, $"{name} has a control character or one that turns the direction of writing; it must have none");
         }
     }
+
+    /// <summary>Control characters, and the marks and overrides of direction (Unicode, bidirectional formatting) that would turn the sentences around a name.</summary>
+    private static bool IsInvisible(char c) => char.IsControl(c) || c is (>= '\u202a' and <= '\u202e') or (>= '\u2066' and <= '\u2069');
 
     private static void CheckIdentifier(IdentifierAttribute identifier, string name, string? value, string pointer, FieldErrors errors)
     {

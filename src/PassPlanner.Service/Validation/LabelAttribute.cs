@@ -1,6 +1,6 @@
 namespace PassPlanner.Service.Validation;
 
-/// <summary>A free text member of bounded length, without control characters.</summary>
+/// <summary>A free text member of bounded length, without control characters and overrides of direction.</summary>
 /// <param name="maximumLength">Greatest number of characters.</param>
 [AttributeUsage(AttributeTargets.Property)]
 public sealed class LabelAttribute(int maximumLength) : Attribute

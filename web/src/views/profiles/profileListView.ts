@@ -62,10 +62,11 @@ function content(kind: ProfileKind, rows: readonly Row[]): Child {
   return [
     h('div', { class: 'title-line' }, h('h1', {}, kind === 'stations' ? count(rows.length, 'station', 'stations') : `${rows.length} spacecraft`), add),
     h('div', { class: 'table-frame', tabindex: '0', role: 'region', 'aria-label': words.title },
-      h('table', { class: 'profiles' },
-        h('thead', {}, h('tr', {}, heads.map((head) => h('th', { scope: 'col' }, head)))),
-        h('tbody', {}, rows.map((row) => h('tr', {},
-          h('th', { scope: 'row' }, h('a', { href: `${words.path}/${encodeURIComponent(row.id)}` }, row.name), row.isDemo && h('span', { class: 'faint' }, ' demo')),
-          h('td', {}, row.first), h('td', { class: 'quiet' }, row.second), h('td', {}, String(row.revision))))))),
+      // The roles are said aloud because the phone lays the rows out as blocks, which takes a table's own roles away.
+      h('table', { class: 'profiles', role: 'table' },
+        h('thead', { role: 'rowgroup' }, h('tr', { role: 'row' }, heads.map((head) => h('th', { scope: 'col', role: 'columnheader' }, head)))),
+        h('tbody', { role: 'rowgroup' }, rows.map((row) => h('tr', { role: 'row' },
+          h('th', { scope: 'row', role: 'rowheader' }, h('a', { href: `${words.path}/${encodeURIComponent(row.id)}` }, row.name), row.isDemo && h('span', { class: 'faint' }, ' demo')),
+          h('td', { role: 'cell' }, row.first), h('td', { class: 'quiet', role: 'cell' }, row.second), h('td', { role: 'cell', title: 'Revision' }, String(row.revision))))))),
   ];
 }

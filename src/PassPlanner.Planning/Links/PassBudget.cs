@@ -45,7 +45,7 @@ public static class PassBudget
         {
             budget
                 .Term("gOverT", "Spacecraft G/T", ((Receiver)chain.Link.Radio).GOverTDbPerK, "dB/K", "entered, where the antenna's gain is greatest")
-                .Term("receiveAntennaRelativeGain", "Spacecraft antenna, off its peak", sample.SpacecraftGainDbi - chain.SpacecraftPeakGainDbi, "dB", chain.SpacecraftGainSource(sample));
+                .Term("receiveAntennaRelativeGain", "Spacecraft antenna", sample.SpacecraftGainDbi - chain.SpacecraftPeakGainDbi, "dB", chain.SpacecraftGainSource(sample));
         }
         else if (chain.Noise is GOverTNoise gOverT)
         {

@@ -19,7 +19,7 @@ public static class ElementSetReader
             if (text.Length > options.MaximumCharacters)
             {
                 return new ElementSetReading(
-                    [], [new RefusedLine(1, 1, $"the text has more than {options.MaximumCharacters} characters; send it in parts")], options.Format ?? ElementSetFormat.TwoLine);
+                    [], [new RefusedLine(1, 1, $"the text has more than {options.MaximumCharacters} characters; send it in parts")], ElementSetFormat.TwoLine);
             }
         }
 
@@ -28,7 +28,7 @@ public static class ElementSetReader
 
     private static ElementSetReading Read(string text, ElementSetReaderOptions options)
     {
-        ElementSetFormat format = options.Format ?? FormatOf(text);
+        ElementSetFormat format = FormatOf(text);
         var sink = new ReadingSink();
         switch (format)
         {

@@ -3,9 +3,6 @@ namespace PassPlanner.Exchange.ElementSets;
 /// <summary>How element sets are read.</summary>
 public sealed record ElementSetReaderOptions
 {
-    /// <summary>Form of the text; found from the text itself when left out.</summary>
-    public ElementSetFormat? Format { get; init; }
-
     /// <summary>Whether a line whose checksum is wrong is taken all the same.</summary>
     public bool AcceptBadChecksums { get; init; }
 

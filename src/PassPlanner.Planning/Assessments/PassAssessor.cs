@@ -45,23 +45,6 @@ public sealed class PassAssessor
         ladder = chain.Ladder;
     }
 
-    /// <summary>Whether a second is usable, given those read before it in <see cref="Add"/>'s order.</summary>
-    /// <param name="second">Number of the second in the pass, from 0.</param>
-    /// <param name="cOverN0DbHz">C/N0 at it, dBHz.</param>
-    /// <param name="firstClosed">First second at which the link had the required margin; set when this is it.</param>
-    /// <param name="ladder">Waveforms.</param>
-    /// <param name="acquisitionS">Acquisition time, s.</param>
-    public static bool IsUsable(int second, double cOverN0DbHz, ref int? firstClosed, WaveformLadder ladder, double acquisitionS)
-    {
-        if (!ladder.Closes(cOverN0DbHz))
-        {
-            return false;
-        }
-
-        firstClosed ??= second;
-        return second - firstClosed.Value >= acquisitionS;
-    }
-
     /// <summary>Reads the next stretch; its samples stand one second apart.</summary>
     public void Add(PassTrack track, LinkColumns columns)
     {
@@ -115,8 +98,13 @@ public sealed class PassAssessor
         lowestMarginDb = Math.Min(lowestMarginDb, marginDb);
 
         bool closes = ladder.Closes(sample.COverN0DbHz);
-        closedS += closes ? 1 : 0;
-        bool usable = IsUsable(seconds, sample.COverN0DbHz, ref firstClosed, ladder, chain.Link.Radio.AcquisitionS);
+        if (closes)
+        {
+            closedS++;
+            firstClosed ??= seconds;
+        }
+
+        bool usable = closes && seconds - firstClosed >= chain.Link.Radio.AcquisitionS;
         if (usable)
         {
             firstUsableElevationDeg = usableS == 0 ? elevationDeg : firstUsableElevationDeg;

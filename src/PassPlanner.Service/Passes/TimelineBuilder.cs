@@ -67,7 +67,7 @@ public static class TimelineBuilder
         WaveformLadder ladder = chain.Ladder;
         double stationHeightM = predicted.Station.Position.HeightM;
         int[] waveform = Column(columns.Samples, s => ladder.Best(s.COverN0DbHz));
-        int[] usable = UsableSeconds(track, columns, chain, stepS, predicted);
+        int[] usable = UsableSamples(track, stepS, predicted);
         return new TimelineResponse
         {
             StartUtc = track.StartUtc.ToString(),
@@ -105,9 +105,9 @@ public static class TimelineBuilder
     }
 
     /// <summary>Which samples lie in a usable window of the assessment, so that a coarse timeline agrees with the list.</summary>
-    private static int[] UsableSeconds(PassTrack track, LinkColumns columns, LinkChain chain, int stepS, PredictedPass predicted)
+    private static int[] UsableSamples(PassTrack track, int stepS, PredictedPass predicted)
     {
-        int[] usable = new int[columns.Count];
+        int[] usable = new int[track.Count];
         foreach (TimeWindow window in predicted.Assessment.UsableWindows)
         {
             int from = (int)Math.Ceiling(window.StartUtc.SecondsSince(track.StartUtc) / stepS);

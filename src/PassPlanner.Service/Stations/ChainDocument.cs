@@ -1,3 +1,4 @@
+using System.Text.Json.Serialization;
 using PassPlanner.Service.Radios;
 using PassPlanner.Service.Validation;
 
@@ -7,6 +8,7 @@ namespace PassPlanner.Service.Stations;
 public abstract record ChainDocument
 {
     /// <summary>Identifier within the antenna.</summary>
+    [JsonPropertyOrder(-1)]
     [Identifier(Required = true)]
     public string? Id { get; init; }
 

@@ -1,4 +1,3 @@
-using System.Text.Json.Serialization;
 using PassPlanner.Service.Validation;
 
 namespace PassPlanner.Service.Stations;

@@ -39,6 +39,8 @@ public class ProfileStoreTests
         Assert.Equal(First, store.FindRevision("a", 1)!.DocumentJson);
         Assert.Equal([(2, Tuesday.Ticks), (1, Monday.Ticks)], store.Revisions("a").Select(r => (r.Revision, r.SavedUtcTicks)));
         Assert.Null(store.FindRevision("a", 3));
+        Assert.Equal(new SaveOutcome.Conflict(2), store.Update("a", 1, First, 0, Tuesday));
+        Assert.Equal(Second, store.Find("a")!.DocumentJson);
     }
 
     [Theory]
